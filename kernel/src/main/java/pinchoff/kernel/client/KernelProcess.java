@@ -63,7 +63,7 @@ public final class KernelProcess implements AutoCloseable {
     }
     LastLines log = new LastLines(process.getInputStream(), onLine);
     KernelProcess kernel = new KernelProcess(process, file, log, KernelClient.connect(connection));
-    process.onExit().thenRun(kernel::ended);
+    kernel.watch();
     boolean answered = false;
     try {
       kernel.client.kernelInfo(limit);
@@ -134,11 +134,19 @@ public final class KernelProcess implements AutoCloseable {
     }
   }
 
-  private void ended() {
+  private void watch() {
+    Thread watcher = new Thread(this::awaitEnd, "pinchoff-kernel-watch");
+    watcher.setDaemon(true);
+    watcher.start();
+  }
+
+  private void awaitEnd() {
     try {
+      process.waitFor();
       log.awaitEnd(Duration.ofMillis(500));
     } catch (InterruptedException e) {
       Thread.currentThread().interrupt();
+      return;
     }
     List<String> lines = log.lines();
     client.abandon(
