@@ -58,6 +58,14 @@ public interface Host {
   default void update(String displayId, MimeBundle bundle) {}
 
   /**
+   * Shows a long text beside the notebook, in the pager of the front end, instead of in the
+   * notebook. Where there is no pager it is published.
+   */
+  default void page(MimeBundle bundle) {
+    publish(bundle);
+  }
+
+  /**
    * Removes the cell's outputs so far.
    *
    * @param wait true to remove them only when the next output comes

@@ -24,6 +24,11 @@ public interface CellOutput {
   /** Replaces every result published under an id. */
   void update(String displayId, MimeBundle bundle);
 
+  /** Shows a long text in the front end's pager, beside the notebook. */
+  default void page(MimeBundle bundle) {
+    publish(Optional.empty(), bundle);
+  }
+
   /** Removes the cell's outputs, at once or when the next output comes. */
   void clear(boolean wait);
 

@@ -65,7 +65,7 @@ final class Executions implements AutoCloseable {
       output.flush();
       remember(asked, number, success.result());
       outbox.reply(
-          Channel.SHELL, request, new ExecuteReply(number, expressions, List.of()), started);
+          Channel.SHELL, request, new ExecuteReply(number, expressions, output.payload()), started);
       return List.of();
     }
     // Taken before the front end can see the error: what it sends after that must run.

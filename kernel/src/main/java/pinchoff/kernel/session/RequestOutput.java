@@ -1,12 +1,15 @@
 package pinchoff.kernel.session;
 
+import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.ScheduledExecutorService;
 import pinchoff.display.MimeBundle;
 import pinchoff.kernel.eval.CellOutput;
+import pinchoff.kernel.json.Json;
 import pinchoff.kernel.limits.Limits;
 import pinchoff.kernel.protocol.ClearOutput;
 import pinchoff.kernel.protocol.Content;
@@ -29,6 +32,7 @@ final class RequestOutput implements CellOutput {
   private final Limits limits;
   private final Object lock = new Object();
   private final StreamBuffer printed;
+  private final List<Object> payload = new ArrayList<>();
 
   RequestOutput(
       Request request,
@@ -68,6 +72,13 @@ final class RequestOutput implements CellOutput {
   }
 
   @Override
+  public void page(MimeBundle bundle) {
+    synchronized (lock) {
+      payload.add(Json.object("source", "page", "data", bundle.data(), "start", 0));
+    }
+  }
+
+  @Override
   public void clear(boolean wait) {
     send(new ClearOutput(wait));
   }
@@ -82,6 +93,13 @@ final class RequestOutput implements CellOutput {
     }
     flush();
     return questions.ask(request, prompt, password);
+  }
+
+  /** What the front end is to do when it has the reply. */
+  List<Object> payload() {
+    synchronized (lock) {
+      return List.copyOf(payload);
+    }
   }
 
   /** Broadcasts the cell's value. */
