@@ -49,6 +49,12 @@ final class SessionHost implements Host {
   }
 
   @Override
+  public void page(MimeBundle bundle) {
+    output().ifPresent(output -> output.page(bundle));
+    checkpoint();
+  }
+
+  @Override
   public void update(String displayId, MimeBundle bundle) {
     output().ifPresent(output -> output.update(displayId, bundle));
     checkpoint();
