@@ -31,6 +31,11 @@ final class Decimal {
     return normal(exact.round(new MathContext(17, RoundingMode.HALF_EVEN)));
   }
 
+  /** The shortest decimal as text; the platform's own differs between versions. */
+  static String text(double value) {
+    return Double.isFinite(value) ? Engineering.shortest(of(value)) : Double.toString(value);
+  }
+
   private static BigDecimal normal(BigDecimal value) {
     return value.signum() == 0 ? BigDecimal.ZERO : value.stripTrailingZeros();
   }

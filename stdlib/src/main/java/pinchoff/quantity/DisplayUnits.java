@@ -10,6 +10,7 @@ import java.util.Map;
  * capacitance per area is shown in fF/µm² or pF/µm², never in mF/m².
  */
 record DisplayUnits(Unit base, boolean prefixed) {
+  private static final int THOUSAND = 3;
 
   private static final Map<Dimension, DisplayUnits> TRADE = new HashMap<>();
 
@@ -40,7 +41,8 @@ record DisplayUnits(Unit base, boolean prefixed) {
   }
 
   /**
-   * The unit with the prefix that leaves a number of at least 1 before the decimal mark.
+   * The unit with the prefix that leaves one to three digits before the decimal mark; without
+   * prefix where none does.
    *
    * @param exponent the power of ten of the leading digit of the value in SI
    */
@@ -52,14 +54,15 @@ record DisplayUnits(Unit base, boolean prefixed) {
     int times = lead.parts() / Dimension.PARTS;
     int rest = base.decimalPower() - times * lead.prefix().power();
     Prefix best = Prefix.NONE;
+    int left = Integer.MAX_VALUE;
     for (Prefix prefix : Prefix.values()) {
-      boolean fits = prefix.power() * times + rest <= exponent;
-      if (prefix != Prefix.CENTI && lead.unit().takes(prefix) && fits) {
+      int here = exponent - rest - prefix.power() * times;
+      if (prefix != Prefix.CENTI && lead.unit().takes(prefix) && here >= 0 && here < left) {
         best = prefix;
+        left = here;
       }
     }
-    boolean belowAll = best == Prefix.NONE && rest > exponent;
-    return belowAll ? base : withLead(best);
+    return left < THOUSAND * times ? withLead(best) : base;
   }
 
   /** True if the unit is the base with some prefix, so that it need not be remembered. */
@@ -77,7 +80,7 @@ record DisplayUnits(Unit base, boolean prefixed) {
   private Unit withLead(Prefix prefix) {
     List<UnitFactor> factors = new ArrayList<>(base.factors());
     UnitFactor lead = factors.get(0);
-    factors.set(0, new UnitFactor(prefix, lead.unit(), lead.parts()));
+    factors.set(0, lead.withPrefix(prefix));
     return Unit.of(factors);
   }
 }

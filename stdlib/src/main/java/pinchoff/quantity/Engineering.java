@@ -22,6 +22,9 @@ public record Engineering(String number, Unit in) {
   /** How many significant digits are shown unless something else is asked for. */
   public static final int DIGITS = 4;
 
+  /** The one unit that stands close to its number. */
+  private static final String DEGREE = "°";
+
   private static final int MOST_DIGITS = 17;
   private static final BigDecimal NOTHING_LOST = new BigDecimal("1e-12");
   private static final int PLAIN_FROM = -3;
@@ -55,7 +58,8 @@ public record Engineering(String number, Unit in) {
 
   /** Number and unit: {@code "650.0 mV"}, {@code "35.00 %"}; a pure number is the number alone. */
   public String text() {
-    return unit().isEmpty() ? number : number + " " + unit();
+    String unit = unit();
+    return number + (unit.isEmpty() || unit.equals(DEGREE) ? "" : " ") + unit;
   }
 
   /**

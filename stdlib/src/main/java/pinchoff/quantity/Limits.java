@@ -1,6 +1,8 @@
 package pinchoff.quantity;
 
 import java.util.Optional;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 
 /**
  * The limits of a specified value: least, typical and most, each optional.
@@ -20,6 +22,21 @@ public record Limits(Optional<Quantity> min, Optional<Quantity> typ, Optional<Qu
     requireOrder("min", min, "typ", typ);
     requireOrder("typ", typ, "max", max);
     requireOrder("min", min, "max", max);
+  }
+
+  /** A least and a most value. */
+  public static Limits between(Quantity least, Quantity most) {
+    return NONE.withMin(least).withMax(most);
+  }
+
+  /** A least value alone. */
+  public static Limits atLeast(Quantity least) {
+    return NONE.withMin(least);
+  }
+
+  /** A most value alone. */
+  public static Limits atMost(Quantity most) {
+    return NONE.withMax(most);
   }
 
   /** These limits with a least value. */
@@ -56,7 +73,11 @@ public record Limits(Optional<Quantity> min, Optional<Quantity> typ, Optional<Qu
 
   private static void requireOrder(
       String low, Optional<Quantity> lower, String high, Optional<Quantity> higher) {
-    if (lower.isPresent() && higher.isPresent() && lower.get().compareTo(higher.get()) > 0) {
+    if (lower.isEmpty() || higher.isEmpty()) {
+      return;
+    }
+    lower.get().requireDimension("limit " + low, higher.get().dimension());
+    if (lower.get().compareTo(higher.get()) > 0) {
       throw new QuantityException(
           low
               + " = "
@@ -70,5 +91,17 @@ public record Limits(Optional<Quantity> min, Optional<Quantity> typ, Optional<Qu
               + " ≤ "
               + high);
     }
+  }
+
+  /** Those that are given: {@code "min 18 µA, typ 20 µA, max 22 µA"}. */
+  @Override
+  public String toString() {
+    return Stream.of(text("min ", min), text("typ ", typ), text("max ", max))
+        .filter(text -> !text.isEmpty())
+        .collect(Collectors.joining(", "));
+  }
+
+  private static String text(String name, Optional<Quantity> limit) {
+    return limit.map(value -> name + value).orElse("");
   }
 }

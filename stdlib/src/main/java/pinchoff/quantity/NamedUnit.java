@@ -39,7 +39,7 @@ enum NamedUnit {
   /** A label: per octave. */
   OCTAVE(Dimension.NONE, "", "oct"),
   /** A label: per square, as in ohm/sq. */
-  SQUARE(Dimension.NONE, "", "□", "sq");
+  SQUARE(Dimension.NONE, "", "sq", "□");
 
   private final Dimension dimension;
   private final String prefixes;

@@ -6,8 +6,8 @@ final class Powers {
   private Powers() {}
 
   /** By repeated squaring, so that the second power is the product of the value with itself. */
-  static double whole(double value, int exponent) {
-    long left = Math.abs((long) exponent);
+  static double whole(double value, long exponent) {
+    long left = Math.abs(exponent);
     double power = 1;
     double square = value;
     while (left > 0) {
@@ -20,12 +20,12 @@ final class Powers {
 
   /** NaN for a root of a negative value. */
   static double rational(double value, int numerator, int denominator) {
-    int sign = denominator < 0 ? -1 : 1;
-    int top = numerator * sign;
-    int bottom = denominator * sign;
+    long sign = denominator < 0 ? -1 : 1;
+    long top = numerator * sign;
+    long bottom = denominator * sign;
     if (top % bottom == 0) {
       return whole(value, top / bottom);
     }
-    return top * 2L == bottom ? Math.sqrt(value) : StrictMath.pow(value, (double) top / bottom);
+    return top * 2 == bottom ? Math.sqrt(value) : StrictMath.pow(value, (double) top / bottom);
   }
 }

@@ -17,6 +17,8 @@ import pinchoff.display.MimeBundle;
  * <p>Results that are NaN or infinite are refused. Minus zero becomes zero.
  */
 public final class Quantity implements Comparable<Quantity>, Displayable {
+  private static final String BY_ZERO = "divided by zero";
+
   private final double si;
   private final Dimension dimension;
   private final @Nullable Unit shown;
@@ -34,11 +36,13 @@ public final class Quantity implements Comparable<Quantity>, Displayable {
    */
   public static Quantity of(double value, Unit unit) {
     if (!Double.isFinite(value)) {
-      throw new QuantityException(value + " " + unit.ascii() + ": expected a finite number");
+      throw new QuantityException(
+          Decimal.text(value) + " " + unit.ascii() + ": expected a finite number");
     }
     double si = unit.toSi(value);
     if (!Double.isFinite(si) || (si == 0 && value != 0)) {
-      throw new QuantityException(value + " " + unit.ascii() + ": out of range in SI");
+      throw new QuantityException(
+          Decimal.text(value) + " " + unit.ascii() + ": out of range in SI");
     }
     return shownIn(si, unit);
   }
@@ -50,7 +54,8 @@ public final class Quantity implements Comparable<Quantity>, Displayable {
    */
   public static Quantity ofSi(double si, Dimension dimension) {
     if (!Double.isFinite(si)) {
-      throw new QuantityException(si + " " + dimension + ": expected a finite number");
+      throw new QuantityException(
+          Decimal.text(si) + " " + dimension + ": expected a finite number");
     }
     return new Quantity(si, dimension, null);
   }
@@ -63,7 +68,7 @@ public final class Quantity implements Comparable<Quantity>, Displayable {
    * @throws QuantityException with the place of the fault
    */
   public static Quantity parse(String text) {
-    return UnitParser.quantity(text);
+    return QuantityParser.quantity(text);
   }
 
   /** An SI value that remembers its unit where that says something. */
@@ -101,7 +106,9 @@ public final class Quantity implements Comparable<Quantity>, Displayable {
               + ": "
               + dimension.description()
               + " is not "
-              + unit.dimension().description());
+              + unit.dimension().description()
+              + "; expected a unit such as "
+              + DisplayUnits.of(dimension).base().ascii());
     }
     double value = unit.fromSi(si);
     if (!Double.isFinite(value)) {
@@ -146,57 +153,103 @@ public final class Quantity implements Comparable<Quantity>, Displayable {
   /** The sum. */
   public Quantity plus(Quantity other) {
     requireSame("plus", other);
-    return result(si + other.si, dimension, shown, "plus", other);
+    double sum = si + other.si;
+    return Double.isFinite(sum)
+        ? new Quantity(sum, dimension, shown)
+        : overflow("plus", other.toString());
   }
 
   /** The difference. */
   public Quantity minus(Quantity other) {
     requireSame("minus", other);
-    return result(si - other.si, dimension, shown, "minus", other);
+    double difference = si - other.si;
+    return Double.isFinite(difference)
+        ? new Quantity(difference, dimension, shown)
+        : overflow("minus", other.toString());
   }
 
   /** The product. */
   public Quantity times(Quantity other) {
-    return result(si * other.si, dimension.times(other.dimension), null, "times", other);
+    double product = si * other.si;
+    return Double.isFinite(product)
+        ? new Quantity(product, dimension.times(other.dimension), null)
+        : overflow("times", other.toString());
   }
 
   /** A multiple. */
   public Quantity times(double factor) {
-    return result(si * factor, dimension, shown, "times", factor);
-  }
-
-  /** The quotient. */
-  public Quantity per(Quantity divisor) {
-    return result(si / divisor.si, dimension.per(divisor.dimension), null, "per", divisor);
-  }
-
-  /** A fraction. */
-  public Quantity per(double divisor) {
-    return result(si / divisor, dimension, shown, "per", divisor);
-  }
-
-  /** A whole power. */
-  public Quantity pow(int exponent) {
-    return result(
-        Powers.whole(si, exponent), dimension.pow(exponent), null, "to the power", exponent);
+    double product = si * factor;
+    return Double.isFinite(product)
+        ? new Quantity(product, dimension, shown)
+        : overflow("times", Decimal.text(factor));
   }
 
   /**
-   * A rational power. A power that is a root takes values of zero and more only.
+   * The quotient.
+   *
+   * @throws QuantityException if the divisor is zero
+   */
+  public Quantity per(Quantity divisor) {
+    double quotient = si / divisor.si;
+    return Double.isFinite(quotient)
+        ? new Quantity(quotient, dimension.per(divisor.dimension), null)
+        : overflow(divisor.isZero() ? BY_ZERO : "per", divisor.toString());
+  }
+
+  /**
+   * A fraction.
+   *
+   * @throws QuantityException if the divisor is zero
+   */
+  public Quantity per(double divisor) {
+    double quotient = si / divisor;
+    return Double.isFinite(quotient)
+        ? new Quantity(quotient, dimension, shown)
+        : overflow(divisor == 0 ? BY_ZERO : "per", Decimal.text(divisor));
+  }
+
+  /**
+   * A whole power.
+   *
+   * @throws QuantityException for zero to a negative power
+   */
+  public Quantity pow(int exponent) {
+    return pow(exponent, 1);
+  }
+
+  /**
+   * A rational power.
    *
    * @param numerator of the exponent
    * @param denominator of the exponent, not 0
+   * @throws QuantityException for a root of a negative value, or zero to a negative power
    */
   public Quantity pow(int numerator, int denominator) {
-    Dimension power = dimension.pow(numerator, denominator);
-    String exponent = numerator + "/" + denominator;
-    return result(
-        Powers.rational(si, numerator, denominator), power, null, "to the power", exponent);
+    Dimension raised = dimension.pow(numerator, denominator);
+    double power = Powers.rational(si, numerator, denominator);
+    if (!Double.isFinite(power)) {
+      String exponent = numerator + (denominator == 1 ? "" : "/" + denominator);
+      boolean negativeRoot = si < 0 && Double.isNaN(power);
+      throw new QuantityException(
+          this
+              + " to the power "
+              + exponent
+              + (negativeRoot
+                  ? ": a root of a negative value; expected zero or more"
+                  : isZero()
+                      ? ": division by zero; expected a value other than zero"
+                      : ": the result is too large"));
+    }
+    return new Quantity(power, raised, null);
   }
 
-  /** The square root of a value of zero or more. */
+  /**
+   * The square root.
+   *
+   * @throws QuantityException for a negative value
+   */
   public Quantity sqrt() {
-    return result(Math.sqrt(si), dimension.sqrt(), null, "to the power", "1/2");
+    return pow(1, 2);
   }
 
   /** The same with the other sign. */
@@ -320,16 +373,10 @@ public final class Quantity implements Comparable<Quantity>, Displayable {
     }
   }
 
-  private Quantity result(
-      double value, Dimension dimension, @Nullable Unit shown, String operation, Object operand) {
-    if (!Double.isFinite(value)) {
-      throw notFinite(value, operation, operand);
-    }
-    return new Quantity(value, dimension, shown);
-  }
-
-  private QuantityException notFinite(double value, String operation, Object operand) {
-    return new QuantityException(
-        this + " " + operation + " " + operand + " is " + value + ": expected a finite result");
+  private Quantity overflow(String operation, String operand) {
+    throw new QuantityException(
+        operation.equals(BY_ZERO)
+            ? this + " per " + operand + ": division by zero; expected a divisor other than zero"
+            : this + " " + operation + " " + operand + ": expected a finite result");
   }
 }

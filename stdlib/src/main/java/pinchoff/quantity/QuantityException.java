@@ -1,6 +1,7 @@
 package pinchoff.quantity;
 
 import java.util.Optional;
+import org.jspecify.annotations.Nullable;
 import pinchoff.source.Issue;
 import pinchoff.source.SourceText;
 
@@ -10,19 +11,19 @@ import pinchoff.source.SourceText;
  */
 public final class QuantityException extends IllegalArgumentException {
   private final String message;
-  private final transient Optional<Issue> issue;
+  private final transient @Nullable Issue issue;
 
   /** An error without a place in a text. */
   public QuantityException(String message) {
-    this(message, Optional.empty());
+    this(message, null);
   }
 
   /** An error at a place in a text; the message is the issue in full. */
   public QuantityException(Issue issue, SourceText source) {
-    this(issue.render(source), Optional.of(issue));
+    this(issue.render(source), issue);
   }
 
-  private QuantityException(String message, Optional<Issue> issue) {
+  private QuantityException(String message, @Nullable Issue issue) {
     super(message);
     this.message = message;
     this.issue = issue;
@@ -35,6 +36,6 @@ public final class QuantityException extends IllegalArgumentException {
 
   /** What is wrong and where, if the error is in a text. */
   public Optional<Issue> issue() {
-    return issue;
+    return Optional.ofNullable(issue);
   }
 }

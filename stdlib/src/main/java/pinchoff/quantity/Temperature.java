@@ -24,7 +24,8 @@ public final class Temperature implements Comparable<Temperature>, Displayable {
    */
   public static Temperature ofKelvin(double kelvin) {
     if (!(kelvin > 0) || Double.isInfinite(kelvin)) {
-      throw new QuantityException("temperature " + kelvin + " K: expected above 0 K and finite");
+      throw new QuantityException(
+          "temperature " + Decimal.text(kelvin) + " K: expected above 0 K and finite");
     }
     return new Temperature(kelvin);
   }
@@ -39,9 +40,18 @@ public final class Temperature implements Comparable<Temperature>, Displayable {
         Double.isFinite(celsius) ? Decimal.of(celsius).add(ZERO_CELSIUS).doubleValue() : celsius;
     if (!(kelvin > 0) || Double.isInfinite(kelvin)) {
       throw new QuantityException(
-          "temperature " + celsius + " degC: expected above -273.15 degC and finite");
+          "temperature " + Decimal.text(celsius) + " degC: expected above -273.15 degC and finite");
     }
     return new Temperature(kelvin);
+  }
+
+  /**
+   * Reads a temperature: {@code "27 degC"}, {@code "27 °C"} or {@code "300.15 K"}.
+   *
+   * @throws QuantityException with the place of the fault
+   */
+  public static Temperature parse(String text) {
+    return QuantityParser.temperature(text);
   }
 
   /** In kelvin. */
@@ -90,6 +100,14 @@ public final class Temperature implements Comparable<Temperature>, Displayable {
   @Override
   public String toString() {
     return Engineering.brief(Quantity.ofSi(celsius(), Dimension.NONE)).number() + " °C";
+  }
+
+  /**
+   * In kelvin, full precision and ASCII: {@link #parse} of it gives the same temperature to the
+   * bit.
+   */
+  public String asciiText() {
+    return Decimal.text(kelvin) + " K";
   }
 
   @Override

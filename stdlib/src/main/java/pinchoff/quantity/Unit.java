@@ -62,7 +62,7 @@ public final class Unit {
         merged.add(factor);
       } else {
         int parts = merged.get(at).parts() + factor.parts();
-        merged.set(at, new UnitFactor(factor.prefix(), factor.unit(), parts));
+        merged.set(at, factor.withParts(parts));
       }
     }
     merged.removeIf(factor -> factor.parts() == 0);
@@ -94,6 +94,12 @@ public final class Unit {
   /** How it is shown in HTML: {@code "µA/V<sup>2</sup>"}; empty for a pure number. */
   public String html() {
     return UnitText.HTML.of(factors);
+  }
+
+  /** How it is typeset by LaTeX in math mode; empty for a pure number. */
+  public String latex() {
+    String inner = UnitText.LATEX.of(factors);
+    return inner.isEmpty() ? "" : "\\mathrm{" + inner + "}";
   }
 
   @Override

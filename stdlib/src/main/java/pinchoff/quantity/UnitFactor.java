@@ -6,21 +6,31 @@ package pinchoff.quantity;
  * @param parts the exponent in sixtieths, never 0 in a finished unit
  */
 record UnitFactor(Prefix prefix, NamedUnit unit, int parts) {
+  private static final int MOST = 99;
 
-  UnitFactor raisedTo(long numerator, long denominator) {
-    long product = parts * numerator;
-    long limit = 100L * Dimension.PARTS;
-    if (product % denominator != 0) {
+  /** This to a further power, in sixtieths. */
+  UnitFactor raisedTo(int exponent) {
+    long product = (long) parts * exponent;
+    if (product % Dimension.PARTS != 0) {
       throw new QuantityException(
           "a power of "
               + ascii()
               + ": expected an exponent that is a multiple of 1/"
               + Dimension.PARTS);
     }
-    if (Math.abs(product / denominator) > limit) {
-      throw new QuantityException("a power of " + ascii() + ": expected an exponent below 100");
+    if (Math.abs(product) > (long) MOST * Dimension.PARTS * Dimension.PARTS) {
+      throw new QuantityException(
+          "a power of " + ascii() + ": expected an exponent of at most " + MOST);
     }
-    return new UnitFactor(prefix, unit, (int) (product / denominator));
+    return withParts((int) (product / Dimension.PARTS));
+  }
+
+  UnitFactor withParts(int exponent) {
+    return new UnitFactor(prefix, unit, exponent);
+  }
+
+  UnitFactor withPrefix(Prefix other) {
+    return new UnitFactor(other, unit, parts);
   }
 
   boolean sameUnit(UnitFactor other) {

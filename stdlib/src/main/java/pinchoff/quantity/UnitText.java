@@ -34,6 +34,15 @@ enum UnitText {
           ? "√" + symbol
           : symbol + "<sup>" + Exponent.text(parts) + "</sup>";
     }
+  },
+  /** For the math mode of LaTeX, inside an upright group. */
+  LATEX("\\cdot ", factor -> latexSymbol(factor.symbol())) {
+    @Override
+    String power(String symbol, int parts) {
+      return parts * 2 == Dimension.PARTS
+          ? "\\sqrt{" + symbol + "}"
+          : symbol + "^{" + Exponent.text(parts) + "}";
+    }
   };
 
   private final String dot;
@@ -42,6 +51,14 @@ enum UnitText {
   UnitText(String dot, Function<UnitFactor, String> symbol) {
     this.dot = dot;
     this.symbol = symbol;
+  }
+
+  private static String latexSymbol(String symbol) {
+    return symbol
+        .replace("µ", "\\mu ")
+        .replace("Ω", "\\Omega ")
+        .replace("%", "\\%")
+        .replace("°", "^{\\circ}");
   }
 
   /** A symbol to a positive power other than 1. */

@@ -2,7 +2,8 @@ package pinchoff.source;
 
 /**
  * Parts of a text from outside, made harmless to show: on one line, of bounded length, without
- * characters that move the cursor, hide or reorder what follows, or are no characters at all.
+ * characters that move the cursor, hide or reorder what follows, or are no characters at all. HTML
+ * is not escaped here: that is done where HTML is written.
  */
 public final class Excerpt {
 
@@ -52,7 +53,6 @@ public final class Excerpt {
       case Character.FORMAT,
           Character.SURROGATE,
           Character.PRIVATE_USE,
-          Character.UNASSIGNED,
           Character.LINE_SEPARATOR,
           Character.PARAGRAPH_SEPARATOR ->
           REPLACEMENT;

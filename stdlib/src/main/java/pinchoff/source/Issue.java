@@ -16,6 +16,9 @@ import java.util.stream.Collectors;
 public record Issue(Severity severity, SourceSpan span, String message, Optional<String> suggestion)
     implements Comparable<Issue> {
 
+  private static final int LONGEST_NAME = 200;
+  private static final int LONGEST_SENTENCE = 1000;
+
   private static final Comparator<Issue> BY_PLACE =
       Comparator.comparing(Issue::span)
           .thenComparing(Issue::severity)
@@ -54,18 +57,21 @@ public record Issue(Severity severity, SourceSpan span, String message, Optional
 
   /**
    * The issue in full: source name, line and column, severity and message, then the line of the
-   * source with a caret under each character of the span.
+   * source with a caret under each character of the span. What could disturb a terminal is
+   * replaced.
    *
    * @param source the text that the span belongs to
    */
   public String render(SourceText source) {
-    return source.name()
+    String name = Excerpt.clip(source.name(), LONGEST_NAME);
+    String text = Excerpt.clip(sentence(), LONGEST_SENTENCE);
+    return name
         + ":"
         + span.start()
         + ": "
         + severity
         + ": "
-        + sentence()
+        + text
         + "\n"
         + CaretLine.of(source, span);
   }

@@ -7,36 +7,40 @@ import java.util.Optional;
 /** Finds what a writer may have meant by a name that does not exist. */
 public final class Suggestions {
   private static final int LONGEST = 64;
+  private static final int EDIT = LONGEST + 1;
 
   private Suggestions() {}
 
   /**
    * The known name nearest to a wrong one: the fewest letters inserted, dropped, exchanged or
-   * swapped with a neighbour, at most one in three. A difference in case counts less than any
-   * other. Of several, the first in alphabetical order.
+   * swapped with a neighbour, at most one in three of the wrong name. A difference in case alone
+   * counts less than any other. Of several, the first in alphabetical order.
    *
    * @param wrong the name that was written
    * @param known the names that exist
    * @return the nearest, or empty if none is near
    */
   public static Optional<String> nearest(String wrong, Collection<String> known) {
-    if (wrong.length() > LONGEST) {
+    if (wrong.isEmpty() || wrong.length() > LONGEST) {
       return Optional.empty();
     }
-    String best = "";
-    int bestCost = 2 * Math.max(1, wrong.length() / 3) + 1;
-    for (String candidate : known) {
-      if (Math.abs(candidate.length() - wrong.length()) * 2 >= bestCost + 2) {
+    int edits = Math.max(1, wrong.length() / 3);
+    // A name of one letter is near nothing but the same letter in the other case.
+    int most = wrong.length() == 1 ? 1 : edits * EDIT;
+    Optional<String> best = Optional.empty();
+    int least = most + 1;
+    for (String name : known) {
+      if (Math.abs(name.length() - wrong.length()) > edits) {
         continue;
       }
-      int cost = cost(wrong, candidate);
-      if (cost < bestCost
-          || (cost == bestCost && !best.isEmpty() && candidate.compareTo(best) < 0)) {
-        best = candidate;
-        bestCost = cost;
+      int cost = cost(wrong, name);
+      boolean first = cost == least && best.filter(b -> name.compareTo(b) < 0).isPresent();
+      if (cost < least || first) {
+        best = Optional.of(name);
+        least = cost;
       }
     }
-    return best.isEmpty() ? Optional.empty() : Optional.of(best);
+    return best;
   }
 
   /** The question {@code "did you mean V_OV?"}, or empty if no known name is near. */
@@ -44,14 +48,18 @@ public final class Suggestions {
     return nearest(wrong, known).map(name -> "did you mean " + name + "?");
   }
 
-  /** Twice the number of edits; a name that differs in case alone costs one in all. */
-  private static int cost(String a, String b) {
-    if (a.equals(b)) {
-      return 0;
+  /** The number of letters in another case if nothing else differs; else the weighted edits. */
+  private static int cost(String wrong, String name) {
+    String a = wrong.toLowerCase(Locale.ROOT);
+    String b = name.toLowerCase(Locale.ROOT);
+    if (!a.equals(b)) {
+      return EDIT * edits(a, b);
     }
-    String x = a.toLowerCase(Locale.ROOT);
-    String y = b.toLowerCase(Locale.ROOT);
-    return x.equals(y) ? 1 : 2 * edits(x, y);
+    int differences = 0;
+    for (int i = 0; i < Math.min(wrong.length(), name.length()); i++) {
+      differences += wrong.charAt(i) == name.charAt(i) ? 0 : 1;
+    }
+    return differences;
   }
 
   /** Edit distance with swaps of neighbours (optimal string alignment). */
