@@ -1,0 +1,39 @@
+package pinchoff.device;
+
+/**
+ * A kind of transistor of a process: parameters, rules, ratings, and where they come from.
+ *
+ * @param parameters the model parameters
+ * @param rules what may be drawn
+ * @param ratings what the process allows
+ * @param source where all of it comes from
+ */
+public record Device(
+    DeviceParameters parameters, GeometryRules rules, Ratings ratings, Source source) {
+
+  /** A device without rules and ratings whose parameters stand in a cell. */
+  public static Device of(DeviceParameters parameters) {
+    return new Device(parameters, GeometryRules.NONE, Ratings.NONE, Source.CELL);
+  }
+
+  /** A device with all that is known of it. */
+  public static Device of(
+      DeviceParameters parameters, GeometryRules rules, Ratings ratings, Source source) {
+    return new Device(parameters, rules, ratings, source);
+  }
+
+  /** The name of the device in its process. */
+  public String name() {
+    return parameters.name();
+  }
+
+  /** n or p. */
+  public Polarity polarity() {
+    return parameters.polarity();
+  }
+
+  @Override
+  public String toString() {
+    return parameters.polarity().letter() + " device " + name();
+  }
+}
