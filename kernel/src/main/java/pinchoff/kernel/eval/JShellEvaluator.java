@@ -1,0 +1,124 @@
+package pinchoff.kernel.eval;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.concurrent.locks.ReentrantLock;
+import org.jspecify.annotations.Nullable;
+import pinchoff.display.Host;
+import pinchoff.display.MimeBundle;
+
+/**
+ * Runs cells in this process, so that their values are real objects.
+ *
+ * <p>Creating one replaces the process's standard streams and its {@link Host}; closing it puts
+ * back what was there. One at a time in a process.
+ */
+public final class JShellEvaluator implements CellEvaluator {
+  private final OutputRouter router = new OutputRouter();
+  private final SnippetCompiler compiler;
+  private final JavaParser parser = new JavaParser(SnippetCompiler.languageLevel());
+  private final SessionHost host;
+  private final Host previousHost;
+  private final ErrorReport report;
+
+  /** One cell at a time. */
+  private final ReentrantLock running = new ReentrantLock();
+
+  private volatile @Nullable CellThread thread;
+
+  private JShellEvaluator(EvaluatorOptions options) {
+    compiler = new SnippetCompiler(options.classPath(), JShellEvaluator.class.getClassLoader());
+    report = new ErrorReport(compiler.frames());
+    host = new SessionHost(compiler.variables(), options.premises());
+    previousHost = Host.install(host);
+    router.install();
+  }
+
+  /** An evaluator with the imports that the class path asks for. */
+  public static JShellEvaluator create(EvaluatorOptions options) {
+    JShellEvaluator evaluator = new JShellEvaluator(options);
+    new SessionImports(evaluator.compiler, options.log()).preload();
+    return evaluator;
+  }
+
+  /** An evaluator with the standard options. */
+  public static JShellEvaluator create() {
+    return create(EvaluatorOptions.standard());
+  }
+
+  @Override
+  public CellOutcome run(Cell cell, CellOutput output) {
+    return run(CellText.of(cell), output);
+  }
+
+  @Override
+  public CellOutcome express(String expression, CellOutput output) {
+    if (!parser.isExpression(expression)) {
+      String message = "expected an expression, found: " + expression;
+      return new CellOutcome.Failure("CompileError", message, List.of(message));
+    }
+    return run(new CellText("expression", expression), output);
+  }
+
+  private CellOutcome run(CellText text, CellOutput output) {
+    running.lock();
+    try {
+      CellGuard.forgetFinished();
+      router.install();
+      CellScope scope = new CellScope(text, output, this::reportUncaught);
+      scope.begin();
+      try (CellThread cellThread = new CellThread(scope, compiler.loader())) {
+        thread = cellThread;
+        return new CellRun(compiler, parser, scope, cellThread).outcome();
+      } finally {
+        thread = null;
+      }
+    } finally {
+      running.unlock();
+    }
+  }
+
+  private void reportUncaught(CellScope scope, Thread failed, Throwable thrown) {
+    String lines = String.join("\n", report.ofThrown(thrown).traceback());
+    scope
+        .output()
+        .write(CellOutput.Stream.ERR, "in thread \"" + failed.getName() + "\": " + lines + "\n");
+  }
+
+  @Override
+  public void interrupt() {
+    CellThread current = thread;
+    if (current != null) {
+      StopLadder.begin(current);
+    }
+  }
+
+  /** How many declarations are alive, imports apart. */
+  long declarations() {
+    return compiler.inquire(
+        shell -> shell.snippets().filter(s -> shell.status(s).isActive()).count());
+  }
+
+  @Override
+  public Completeness completeness(String code) {
+    return new Completeness(Completeness.Status.UNKNOWN, "");
+  }
+
+  @Override
+  public Completions complete(String code, int cursor) {
+    return new Completions(cursor, cursor, List.of());
+  }
+
+  @Override
+  public Optional<MimeBundle> inspect(String code, int cursor, int detail) {
+    return Optional.empty();
+  }
+
+  @Override
+  public void close() {
+    interrupt();
+    router.close();
+    Host.install(previousHost);
+    compiler.close();
+  }
+}

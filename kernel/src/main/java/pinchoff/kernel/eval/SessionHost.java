@@ -1,0 +1,95 @@
+package pinchoff.kernel.eval;
+
+import java.util.Collections;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.Optional;
+import pinchoff.display.Host;
+import pinchoff.display.MimeBundle;
+
+/** What the code of cells may ask of their session. */
+final class SessionHost implements Host {
+  private final SessionVariables variables;
+  private final Map<String, String> premises;
+  private final Map<String, String> technologies =
+      Collections.synchronizedMap(new LinkedHashMap<>());
+
+  SessionHost(SessionVariables variables, Map<String, String> premises) {
+    this.variables = variables;
+    this.premises = Map.copyOf(premises);
+  }
+
+  /** The technology files that cells have read: name to hash of the content. */
+  Map<String, String> technologies() {
+    synchronized (technologies) {
+      return Collections.unmodifiableMap(new LinkedHashMap<>(technologies));
+    }
+  }
+
+  @Override
+  public Optional<Object> lookup(String name) {
+    return variables.value(name);
+  }
+
+  @Override
+  public Optional<String> premise(String name) {
+    return Optional.ofNullable(premises.get(name));
+  }
+
+  @Override
+  public void publish(MimeBundle bundle) {
+    output().ifPresent(output -> output.publish(Optional.empty(), bundle));
+    checkpoint();
+  }
+
+  @Override
+  public void publish(String displayId, MimeBundle bundle) {
+    output().ifPresent(output -> output.publish(Optional.of(displayId), bundle));
+    checkpoint();
+  }
+
+  @Override
+  public void update(String displayId, MimeBundle bundle) {
+    output().ifPresent(output -> output.update(displayId, bundle));
+    checkpoint();
+  }
+
+  @Override
+  public void clear(boolean wait) {
+    output().ifPresent(output -> output.clear(wait));
+  }
+
+  @Override
+  public String ask(String prompt, boolean password) {
+    CellScope scope =
+        CellScope.current()
+            .or(CellScope::latest)
+            .orElseThrow(() -> new IllegalStateException("no cell has run: nobody can be asked"));
+    return ask(scope, prompt, password);
+  }
+
+  /** Asks the user of a cell. An interrupt while waiting ends the cell. */
+  static String ask(CellScope scope, String prompt, boolean password) {
+    try {
+      return scope.output().ask(prompt, password);
+    } catch (InterruptedException e) {
+      CellGuard.check();
+      Thread.currentThread().interrupt();
+      throw new IllegalStateException("the question \"" + prompt + "\" was interrupted", e);
+    }
+  }
+
+  @Override
+  public void checkpoint() {
+    CellGuard.check();
+  }
+
+  @Override
+  public void noteTechnology(String name, String contentHash) {
+    technologies.put(name, contentHash);
+  }
+
+  private static Optional<CellOutput> output() {
+    return CellScope.current().or(CellScope::latest).map(CellScope::output);
+  }
+}
