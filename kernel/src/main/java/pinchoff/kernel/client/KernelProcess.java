@@ -63,7 +63,11 @@ public final class KernelProcess implements AutoCloseable {
     }
     LastLines log = new LastLines(process.getInputStream(), onLine);
     KernelProcess kernel = new KernelProcess(process, file, log, KernelClient.connect(connection));
+<<<<<<< HEAD
+    kernel.watch();
+=======
     process.onExit().thenRun(kernel::ended);
+>>>>>>> protocol2
     boolean answered = false;
     try {
       kernel.client.kernelInfo(limit);
@@ -134,11 +138,27 @@ public final class KernelProcess implements AutoCloseable {
     }
   }
 
+<<<<<<< HEAD
+  private void watch() {
+    Thread watcher = new Thread(this::awaitEnd, "pinchoff-kernel-watch");
+    watcher.setDaemon(true);
+    watcher.start();
+  }
+
+  private void awaitEnd() {
+    try {
+      process.waitFor();
+      log.awaitEnd(Duration.ofMillis(500));
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
+      return;
+=======
   private void ended() {
     try {
       log.awaitEnd(Duration.ofMillis(500));
     } catch (InterruptedException e) {
       Thread.currentThread().interrupt();
+>>>>>>> protocol2
     }
     List<String> lines = log.lines();
     client.abandon(
