@@ -44,6 +44,11 @@ final class CellPlan {
           Tree.Kind.PREFIX_DECREMENT,
           Tree.Kind.POSTFIX_DECREMENT);
 
+  /** A block must stay well below the largest size of a method. */
+  private static final int MAX_RUN = 100;
+
+  private static final int MAX_RUN_CHARACTERS = 10_000;
+
   private CellPlan() {}
 
   /** The same units with their kinds found out. */
@@ -74,7 +79,9 @@ final class CellPlan {
       boolean joins =
           unit.kind() == CellUnit.Kind.PLAIN
               && !runs.isEmpty()
-              && last(last(runs)).kind() == CellUnit.Kind.PLAIN;
+              && last(last(runs)).kind() == CellUnit.Kind.PLAIN
+              && last(runs).size() < MAX_RUN
+              && unit.end() - last(runs).get(0).start() < MAX_RUN_CHARACTERS;
       if (joins) {
         last(runs).add(unit);
       } else {

@@ -90,6 +90,7 @@ final class CellRun {
     return code.contains("unreachable")
         || code.contains("initializer.must.be.able")
         || code.contains("limit.code")
+        || code.equals("rejected")
         || code.contains("already.defined");
   }
 

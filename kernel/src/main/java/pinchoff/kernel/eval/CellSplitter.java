@@ -7,6 +7,8 @@ import jdk.jshell.SourceCodeAnalysis.CompletionInfo;
 
 /** Cuts a cell into the units that the compiler takes one at a time. */
 final class CellSplitter {
+  private static final int FIRST_WINDOW = 1000;
+
   private final SourceCodeAnalysis analysis;
 
   CellSplitter(SourceCodeAnalysis analysis) {
@@ -21,7 +23,7 @@ final class CellSplitter {
     String code = cell.code();
     int at = 0;
     while (at < code.length()) {
-      String rest = code.substring(at);
+      String rest = windowFrom(code, at);
       CompletionInfo info = analysis.analyzeCompletion(rest);
       if (isEmpty(rest, info)) {
         break;
@@ -42,6 +44,27 @@ final class CellSplitter {
       at += length;
     }
     return units;
+  }
+
+  /**
+   * As much of the code as is needed to see where its first unit ends. The analyser reads all that
+   * it is given for each unit, which a long cell would make slow.
+   */
+  private String windowFrom(String code, int at) {
+    for (int size = FIRST_WINDOW; at + size < code.length(); size *= 4) {
+      int cut = code.lastIndexOf('\n', at + size);
+      if (cut <= at) {
+        continue;
+      }
+      String window = code.substring(at, cut);
+      CompletionInfo info = analysis.analyzeCompletion(window);
+      boolean nextSeen =
+          info.completeness().isComplete() && !JavaText.masked(info.remaining()).isBlank();
+      if (nextSeen) {
+        return window;
+      }
+    }
+    return code.substring(at);
   }
 
   private static boolean isEmpty(String rest, CompletionInfo info) {

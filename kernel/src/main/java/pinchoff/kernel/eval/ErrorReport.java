@@ -82,11 +82,12 @@ final class ErrorReport {
 
   private List<String> trace(Throwable thrown, boolean withSource) {
     List<String> lines = new ArrayList<>();
-    StackTraceElement[] trace = thrown.getStackTrace();
+    StackTraceElement[] trace = traceOf(thrown);
     boolean sourceShown = !withSource;
     int library = 0;
     int cell = 0;
     int left = 0;
+    String lastFrame = "";
     @Nullable StackTraceElement inner = null;
     for (StackTraceElement frame : trace) {
       Optional<CellText.Place> place = frames.placeOf(frame);
@@ -95,7 +96,14 @@ final class ErrorReport {
           left++;
         } else {
           CellText.Place precise = CallColumn.refine(place.get(), inner, thrown);
-          lines.add("at " + precise.inWords() + inMethod(frame));
+          String line = "at " + precise.inWords() + inMethod(frame);
+          if (line.equals(lastFrame)) {
+            cell--;
+            left++;
+          } else {
+            lines.add(line);
+            lastFrame = line;
+          }
           if (!sourceShown) {
             lines.addAll(precise.underlined());
             sourceShown = true;
@@ -118,6 +126,15 @@ final class ErrorReport {
     return lines;
   }
 
+  private static StackTraceElement[] traceOf(Throwable thrown) {
+    try {
+      StackTraceElement[] trace = thrown.getStackTrace();
+      return trace == null ? new StackTraceElement[0] : trace;
+    } catch (RuntimeException | StackOverflowError e) {
+      return new StackTraceElement[0];
+    }
+  }
+
   private static String inMethod(StackTraceElement frame) {
     String method = frame.getMethodName();
     return method.startsWith("do_it$") || method.startsWith("lambda$") ? "" : " in " + method;
@@ -129,6 +146,7 @@ final class ErrorReport {
     return type.startsWith("pinchoff.kernel.")
         || type.startsWith("jdk.internal.reflect.")
         || type.startsWith("java.lang.reflect.")
+        || (type.equals("java.lang.Thread") && frame.getMethodName().equals("run"))
         || FrameMap.isOfCell(type);
   }
 }

@@ -1,6 +1,7 @@
 package pinchoff.kernel.eval;
 
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.locks.ReentrantLock;
 import org.jspecify.annotations.Nullable;
@@ -91,6 +92,11 @@ public final class JShellEvaluator implements CellEvaluator {
     if (current != null) {
       StopLadder.begin(current);
     }
+  }
+
+  /** The technology files that cells have read: name to hash of the content. */
+  public Map<String, String> technologies() {
+    return host.technologies();
   }
 
   /** How many declarations are alive, imports apart. */

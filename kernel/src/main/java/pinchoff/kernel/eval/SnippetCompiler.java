@@ -202,7 +202,11 @@ final class SnippetCompiler implements AutoCloseable {
         }
       }
       case RECOVERABLE_NOT_DEFINED -> {
-        String missing = missing((DeclarationSnippet) snippet);
+        if (!(snippet instanceof DeclarationSnippet declaration)) {
+          problems.add(rejected(unit));
+          return;
+        }
+        String missing = missing(declaration);
         if (snippet instanceof VarSnippet) {
           shell.drop(snippet);
           String message = "cannot find symbol: " + missing;
@@ -214,10 +218,15 @@ final class SnippetCompiler implements AutoCloseable {
       }
       default -> {
         if (problems.isEmpty()) {
-          problems.add(new CompileProblem(true, "rejected", "this cannot be compiled", unit, 0));
+          problems.add(rejected(unit));
         }
       }
     }
+  }
+
+  /** The compiler gives no reason, as when a unit is too large for it. */
+  private static CompileProblem rejected(CellUnit unit) {
+    return new CompileProblem(true, "rejected", "this cannot be compiled", unit, 0);
   }
 
   /** An earlier declaration was compiled anew, or has lost what it needs. */
