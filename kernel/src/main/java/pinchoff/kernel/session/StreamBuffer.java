@@ -61,8 +61,10 @@ final class StreamBuffer {
       text.delete(0, end);
     }
     if (text.length() > 0 && !scheduled) {
-      scheduled = true;
-      timer.schedule(this::onTime, limits.streamDelay().toMillis(), TimeUnit.MILLISECONDS);
+      scheduled =
+          !timer
+              .schedule(this::onTime, limits.streamDelay().toMillis(), TimeUnit.MILLISECONDS)
+              .isCancelled();
     }
   }
 

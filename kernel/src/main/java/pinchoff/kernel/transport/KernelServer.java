@@ -137,7 +137,7 @@ public final class KernelServer implements MessagePort, AutoCloseable {
   @Override
   public boolean ask(Message question) throws InterruptedException {
     try {
-      return requests.send(Channel.STDIN, wire.encode(question)).get();
+      return requests.deliver(Channel.STDIN, wire.encode(question)).get();
     } catch (ExecutionException e) {
       return false;
     }

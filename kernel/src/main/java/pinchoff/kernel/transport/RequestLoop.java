@@ -61,8 +61,13 @@ final class RequestLoop implements Runnable {
     return socket;
   }
 
+  /** Sends a message. */
+  void send(Channel channel, List<byte[]> frames) {
+    outbox.put(new Letter(channel, frames, new CompletableFuture<>(), false));
+  }
+
   /** Sends a message; the future tells whether there was somebody to send it to. */
-  CompletableFuture<Boolean> send(Channel channel, List<byte[]> frames) {
+  CompletableFuture<Boolean> deliver(Channel channel, List<byte[]> frames) {
     CompletableFuture<Boolean> done = new CompletableFuture<>();
     outbox.put(new Letter(channel, frames, done, false));
     return done;
@@ -70,7 +75,7 @@ final class RequestLoop implements Runnable {
 
   /** Completes when everything that had arrived at this moment has been handed on. */
   CompletableFuture<Boolean> readEmpty() {
-    return send(Channel.SHELL, List.of());
+    return deliver(Channel.SHELL, List.of());
   }
 
   /** Ends the thread after what was left before has been sent. */
