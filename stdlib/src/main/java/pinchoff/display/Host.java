@@ -34,6 +34,15 @@ public interface Host {
   }
 
   /**
+   * What is known of a name as it stands in a cell: signature and meaning.
+   *
+   * @return the help, or empty if nothing is known of it
+   */
+  default Optional<MimeBundle> help(String name) {
+    return Optional.empty();
+  }
+
+  /**
    * A value given from outside for a premise, as text.
    *
    * @param name the premise's name
