@@ -57,7 +57,7 @@ final class CoherentUnits {
   };
 
   /** Named units to try with one further factor, and those further factors. */
-  private static final String[] FIRST = {"A", "V", "C", "F", "W", "J", "S", "ohm", "H", "Hz"};
+  private static final String[] FIRST = {"A", "V", "F", "C", "W", "J", "S", "ohm", "H", "Hz"};
 
   private static final String[] SECOND = {"V", "A", "m", "s", "K", "Hz"};
 

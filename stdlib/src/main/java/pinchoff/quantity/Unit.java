@@ -4,6 +4,7 @@ import java.math.BigDecimal;
 import java.math.BigInteger;
 import java.math.MathContext;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 
 /**
@@ -66,6 +67,8 @@ public final class Unit {
       }
     }
     merged.removeIf(factor -> factor.parts() == 0);
+    merged.sort(
+        Comparator.comparing(factor -> factor.parts() < 0)); // what is divided by comes last
     return merged.isEmpty() ? ONE : new Unit(merged);
   }
 
