@@ -3,6 +3,7 @@ package pinchoff.page;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
 import pinchoff.quantity.Unit;
 
 /**
@@ -12,8 +13,9 @@ import pinchoff.quantity.Unit;
  * @param columns the columns that have content
  * @param rows the rows that are shown
  * @param hidden how many rows are not shown
+ * @param runsOn true if text may run on into empty cells behind it
  */
-record Grid(List<Lane> columns, List<Table.Row> rows, int hidden) {
+record Grid(List<Lane> columns, List<Table.Row> rows, int hidden, boolean runsOn) {
   /** The most rows that are shown; a longer table says how many more there are. */
   static final int MAX_ROWS = 200;
 
@@ -30,10 +32,10 @@ record Grid(List<Lane> columns, List<Table.Row> rows, int hidden) {
    * @param shared the unit that all share
    * @param whole the most characters before a decimal mark
    * @param fraction the most characters from a decimal mark on
-   * @param unit the most characters of a unit beside its number
+   * @param behind the most characters behind a number: its unit, rarely a power of ten
    */
   record Lane(
-      Column column, List<Cell> cells, Optional<Unit> shared, int whole, int fraction, int unit) {
+      Column column, List<Cell> cells, Optional<Unit> shared, int whole, int fraction, int behind) {
 
     /** True if it holds any number, so that decimal marks stand under each other. */
     boolean numeric() {
@@ -42,13 +44,29 @@ record Grid(List<Lane> columns, List<Table.Row> rows, int hidden) {
 
     /** True if units stand beside their numbers. */
     boolean hasUnits() {
-      return unit > 0;
+      return behind > 0;
     }
 
     private boolean isEmpty() {
       return column.heading().isEmpty()
           && cells.stream().allMatch(c -> c.entry().equals(Entry.EMPTY));
     }
+  }
+
+  /**
+   * How many lanes a text may take: in a sheet it may run on where nothing stands behind it, so
+   * that one long text does not push all numbers apart.
+   */
+  int reach(int row, int lane) {
+    Cell cell = columns.get(lane).cells().get(row);
+    int reach = 1;
+    if (runsOn && cell.figure().isEmpty()) {
+      while (lane + reach < columns.size()
+          && columns.get(lane + reach).cells().get(row).entry().equals(Entry.EMPTY)) {
+        reach++;
+      }
+    }
+    return reach;
   }
 
   static Grid of(Table table) {
@@ -61,7 +79,7 @@ record Grid(List<Lane> columns, List<Table.Row> rows, int hidden) {
         lanes.add(lane);
       }
     }
-    return new Grid(lanes, rows, table.rows().size() - shown);
+    return new Grid(lanes, rows, table.rows().size() - shown, !table.hasHeadings());
   }
 
   private static Lane lane(Table table, int index, List<Table.Row> rows) {
@@ -75,14 +93,22 @@ record Grid(List<Lane> columns, List<Table.Row> rows, int hidden) {
     if (shared.isPresent()) {
       evenOut(cells);
     }
-    List<Figure> figures = cells.stream().flatMap(c -> c.figure().stream()).toList();
+    List<Figure> figures = figures(cells);
     return new Lane(
         column,
         cells,
         shared,
-        figures.stream().mapToInt(Figure::wholeLength).max().orElse(0),
-        figures.stream().mapToInt(Figure::fractionLength).max().orElse(0),
-        shared.isPresent() ? 0 : figures.stream().mapToInt(f -> f.unit().length()).max().orElse(0));
+        longest(figures, Figure::whole),
+        longest(figures, Figure::fraction),
+        shared.isPresent() ? 0 : longest(figures, Figure::behindText));
+  }
+
+  private static List<Figure> figures(List<Cell> cells) {
+    return cells.stream().flatMap(c -> c.figure().stream()).toList();
+  }
+
+  private static int longest(List<Figure> figures, Function<Figure, String> part) {
+    return figures.stream().mapToInt(f -> part.apply(f).length()).max().orElse(0);
   }
 
   private static Cell cell(Entry entry, Optional<Unit> shared) {
@@ -93,16 +119,17 @@ record Grid(List<Lane> columns, List<Table.Row> rows, int hidden) {
     return new Cell(entry, Figure.of(entry));
   }
 
-  /** Values of a sweep, 0.6 0.65 0.7, get the same number of decimals: they are exact. */
+  /**
+   * Gives the values of a sweep digits alike: if all are exact, so many decimals as the longest has
+   * (0.50 0.55 0.60), else as many digits as were asked for.
+   */
   private static void evenOut(List<Cell> cells) {
-    if (cells.stream().flatMap(c -> c.figure().stream()).allMatch(Figure::exact)) {
-      int fraction =
-          cells.stream()
-              .flatMap(c -> c.figure().stream())
-              .mapToInt(Figure::fractionLength)
-              .max()
-              .orElse(0);
-      cells.replaceAll(c -> new Cell(c.entry(), c.figure().map(f -> f.padded(fraction))));
-    }
+    List<Figure> figures = figures(cells);
+    boolean exact = figures.stream().allMatch(Figure::exact);
+    int fraction = longest(figures, Figure::fraction);
+    cells.replaceAll(
+        cell ->
+            new Cell(
+                cell.entry(), cell.figure().map(f -> exact ? f.padded(fraction) : f.inFull())));
   }
 }

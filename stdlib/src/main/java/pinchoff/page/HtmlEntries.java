@@ -52,6 +52,10 @@ final class HtmlEntries {
   /** The sign of a standing; its colour says nothing that the sign does not. */
   static String sign(Standing standing) {
     String name = standing.name().toLowerCase(Locale.ROOT);
-    return "<b class=\"pinchoff-" + name + "\">" + Escape.html(standing.sign()) + "</b>";
+    return "<b class=\"pinchoff-sign pinchoff-"
+        + name
+        + "\">"
+        + Escape.html(standing.sign())
+        + "</b>";
   }
 }

@@ -70,7 +70,10 @@ final class HtmlPage {
     } else if (block instanceof TrustLine trust) {
       line(
           "p class=\"pinchoff-trust\"",
-          HtmlEntries.sign(trust.standing()) + " Trust: " + HtmlEntries.html(trust.text()));
+          HtmlEntries.sign(trust.standing())
+              + " <span>Trust: "
+              + HtmlEntries.html(trust.text())
+              + "</span>");
     } else if (block instanceof Fold fold) {
       out.append("<details class=\"pinchoff-fold\"><summary>");
       out.append(HtmlEntries.html(fold.summary())).append("</summary>");

@@ -79,43 +79,55 @@ final class HtmlTable {
 
   private void writeRow(int row) {
     if (grid.rows().get(row) instanceof Table.Row.Group group) {
-      int span = grid.columns().stream().mapToInt(lane -> lane.hasUnits() ? 2 : 1).sum();
       out.append("<tr class=\"pinchoff-group\"><th scope=\"rowgroup\" align=\"left\" colspan=\"");
-      out.append(span).append("\">").append(HtmlEntries.html(group.title())).append("</th></tr>");
+      out.append(span(0, grid.columns().size()))
+          .append("\">")
+          .append(HtmlEntries.html(group.title()))
+          .append("</th></tr>");
       return;
     }
     out.append("<tr>");
-    for (Lane lane : grid.columns()) {
+    for (int i = 0; i < grid.columns().size(); ) {
+      Lane lane = grid.columns().get(i);
       Cell cell = lane.cells().get(row);
-      cell.figure()
-          .ifPresentOrElse(
-              figure -> writeFigure(lane, figure), () -> writeText(lane, cell.entry()));
+      int reach = grid.reach(row, i);
+      if (cell.figure().isPresent()) {
+        writeFigure(lane, cell.figure().get());
+      } else {
+        writeText(lane, cell.entry(), span(i, i + reach));
+      }
+      i += reach;
     }
     out.append("</tr>");
   }
 
+  /** The columns of HTML that some columns of the table take. */
+  private int span(int from, int to) {
+    return grid.columns().subList(from, to).stream()
+        .mapToInt(lane -> lane.hasUnits() ? 2 : 1)
+        .sum();
+  }
+
   private void writeFigure(Lane lane, Figure figure) {
-    out.append("<td class=\"pinchoff-n\" align=\"right\">").append(figure.numberHtml());
-    int missing = lane.fraction() - figure.fractionLength();
-    if (missing > 0 && figure.fractionLength() == 0) {
+    out.append("<td class=\"pinchoff-n\" align=\"right\">").append(figure.signedDigits());
+    int missing = lane.fraction() - figure.fraction().length();
+    if (missing > 0 && figure.fraction().isEmpty()) {
       out.append(PUNCTUATION_SPACE);
       missing--;
     }
-    for (int i = 0; i < missing; i++) {
-      out.append(FIGURE_SPACE);
+    out.append(String.valueOf(FIGURE_SPACE).repeat(Math.max(0, missing)));
+    if (lane.hasUnits()) {
+      out.append("</td><td class=\"pinchoff-u\" align=\"left\">").append(figure.behindHtml());
+    } else if (figure.power() != 0) {
+      out.append("×10<sup>").append(figure.power()).append("</sup>");
     }
     out.append("</td>");
-    if (lane.hasUnits()) {
-      out.append("<td class=\"pinchoff-u\" align=\"left\">")
-          .append(figure.unitHtml())
-          .append("</td>");
-    }
   }
 
-  private void writeText(Lane lane, Entry entry) {
-    boolean beside = lane.numeric() && !lane.hasUnits();
-    out.append(beside ? "<td class=\"pinchoff-n\" align=\"right\"" : "<td" + alignment(lane));
-    out.append(lane.hasUnits() ? " colspan=\"2\">" : ">");
+  private void writeText(Lane lane, Entry entry, int span) {
+    boolean asNumber = lane.numeric() && !lane.hasUnits();
+    out.append(asNumber ? "<td class=\"pinchoff-n\" align=\"right\"" : "<td" + alignment(lane));
+    out.append(span > 1 ? " colspan=\"" + span + "\">" : ">");
     out.append(HtmlEntries.html(entry)).append("</td>");
   }
 

@@ -139,11 +139,9 @@ final class LatexPage {
   }
 
   private static String figure(Lane lane, Figure figure) {
-    String number = figure.numberLatex();
-    int mark = number.indexOf('.') < 0 ? number.length() : number.indexOf('.');
-    String whole = LatexEntries.math(number.substring(0, mark));
-    String fraction = LatexEntries.math(number.substring(mark));
-    String unit = lane.hasUnits() ? " & " + LatexEntries.math(figure.unitLatex()) : "";
-    return whole + " & " + fraction + unit;
+    String power = figure.power() == 0 ? "" : "\\times 10^{" + figure.power() + "}";
+    String fraction = figure.fraction() + (lane.hasUnits() ? "" : power);
+    String behind = lane.hasUnits() ? " & " + LatexEntries.math(figure.behindLatex()) : "";
+    return LatexEntries.math(figure.whole()) + " & " + LatexEntries.math(fraction) + behind;
   }
 }

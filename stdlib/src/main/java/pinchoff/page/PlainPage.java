@@ -2,6 +2,7 @@ package pinchoff.page;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /** Sets a page as plain text for a terminal. */
 final class PlainPage {
@@ -27,18 +28,24 @@ final class PlainPage {
   }
 
   private static void addBlocks(List<String> lines, List<Block> blocks) {
+    Optional<Block> above = Optional.empty();
     for (Block block : blocks) {
-      List<String> more = lines(block);
-      if (!lines.isEmpty() && needsSpace(block)) {
+      if (!lines.isEmpty() && !staysClose(above, block)) {
         lines.add("");
       }
-      lines.addAll(more);
+      lines.addAll(lines(block));
+      above = Optional.of(block);
     }
   }
 
-  /** Lines that belong to what stands above them stay close to it. */
-  private static boolean needsSpace(Block block) {
-    return !(block instanceof VerdictBlock || block instanceof TrustLine);
+  /** A title, a heading and what follows it stay together, and so do lines with a sign. */
+  private static boolean staysClose(Optional<Block> above, Block block) {
+    return above.map(a -> a instanceof Heading || (isSigned(a) && isSigned(block))).orElse(true)
+        || block instanceof TrustLine;
+  }
+
+  private static boolean isSigned(Block block) {
+    return block instanceof VerdictBlock || block instanceof TrustLine;
   }
 
   private static List<String> lines(Block block) {

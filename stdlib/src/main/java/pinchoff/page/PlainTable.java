@@ -1,8 +1,11 @@
 package pinchoff.page;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.function.IntFunction;
+import java.util.function.IntUnaryOperator;
+import java.util.stream.IntStream;
 import pinchoff.page.Grid.Cell;
 import pinchoff.page.Grid.Lane;
 
@@ -13,12 +16,15 @@ final class PlainTable {
 
   private final Table table;
   private final Grid grid;
+  private final String indent;
   private final int[] widths;
 
   private PlainTable(Table table) {
     this.table = table;
     this.grid = Grid.of(table);
-    this.widths = grid.columns().stream().mapToInt(PlainTable::width).toArray();
+    this.indent = grid.rows().stream().anyMatch(Table.Row.Group.class::isInstance) ? GAP : "";
+    this.widths = IntStream.range(0, grid.columns().size()).map(this::needed).toArray();
+    stretch();
     fit();
   }
 
@@ -40,7 +46,7 @@ final class PlainTable {
 
   private void addRows(List<String> lines) {
     if (table.hasHeadings()) {
-      addLine(lines, i -> heading(grid.columns().get(i)));
+      addLine(lines, i -> heading(grid.columns().get(i)), i -> 1);
       lines.add("─".repeat(total()));
     }
     for (int r = 0; r < grid.rows().size(); r++) {
@@ -48,28 +54,37 @@ final class PlainTable {
       if (grid.rows().get(r) instanceof Table.Row.Group group) {
         lines.add(group.title().text());
       } else {
-        addLine(lines, i -> shown(grid.columns().get(i), row));
+        addLine(lines, i -> shown(grid.columns().get(i), row), i -> grid.reach(row, i));
       }
     }
   }
 
   /** One row, which takes several lines where text is broken. */
-  private void addLine(List<String> lines, IntFunction<String> texts) {
+  private void addLine(List<String> lines, IntFunction<String> texts, IntUnaryOperator reaches) {
     List<List<String>> cells = new ArrayList<>();
     int height = 1;
-    for (int i = 0; i < widths.length; i++) {
-      List<String> cell = TextWidth.wrapped(texts.apply(i), Math.max(1, widths[i]));
+    for (int i = 0; i < widths.length; i += reaches.applyAsInt(i)) {
+      int width = width(i, i + reaches.applyAsInt(i));
+      List<String> cell = new ArrayList<>();
+      for (String line : TextWidth.wrapped(texts.apply(i), width)) {
+        cell.add(aligned(grid.columns().get(i), line, width));
+      }
       cells.add(cell);
       height = Math.max(height, cell.size());
     }
     for (int h = 0; h < height; h++) {
-      StringBuilder line = new StringBuilder();
-      for (int i = 0; i < widths.length; i++) {
-        String text = h < cells.get(i).size() ? cells.get(i).get(h) : "";
-        line.append(i > 0 ? GAP : "").append(aligned(grid.columns().get(i), text, widths[i]));
+      StringBuilder line = new StringBuilder(indent);
+      for (List<String> cell : cells) {
+        line.append(line.length() > indent.length() ? GAP : "");
+        line.append(h < cell.size() ? cell.get(h) : " ".repeat(TextWidth.of(cell.get(0))));
       }
       lines.add(line.toString().stripTrailing());
     }
+  }
+
+  /** The width of some columns and the gaps between them; at least one. */
+  private int width(int from, int to) {
+    return Math.max(1, Arrays.stream(widths, from, to).sum() + GAP.length() * (to - from - 1));
   }
 
   private static String aligned(Lane lane, String text, int width) {
@@ -88,10 +103,13 @@ final class PlainTable {
   }
 
   private static String figure(Lane lane, Figure figure) {
-    return " ".repeat(lane.whole() - figure.wholeLength())
-        + figure.number()
-        + " ".repeat(lane.fraction() - figure.fractionLength())
-        + (lane.hasUnits() ? " " + TextWidth.left(figure.unit(), lane.unit()) : "");
+    String number = TextWidth.right(figure.whole(), lane.whole()) + figure.fraction();
+    int decimals = lane.whole() + lane.fraction();
+    if (figure.power() != 0) {
+      return number + (lane.hasUnits() ? figure.behindText() : "e" + figure.power());
+    }
+    String aligned = TextWidth.left(number, decimals);
+    return lane.hasUnits() ? aligned + TextWidth.left(figure.behindText(), lane.behind()) : aligned;
   }
 
   private static String heading(Lane lane) {
@@ -103,20 +121,31 @@ final class PlainTable {
         .orElse(text);
   }
 
-  private static int width(Lane lane) {
+  /** The width that a column needs, texts that may run on left aside. */
+  private int needed(int column) {
+    Lane lane = grid.columns().get(column);
     int width = TextWidth.of(heading(lane));
     for (int row = 0; row < lane.cells().size(); row++) {
-      width = Math.max(width, TextWidth.of(shown(lane, row)));
+      if (grid.reach(row, column) == 1) {
+        width = Math.max(width, TextWidth.of(shown(lane, row)));
+      }
     }
     return width;
   }
 
-  private int total() {
-    int total = GAP.length() * (widths.length - 1);
-    for (int width : widths) {
-      total += width;
+  /** Widens the last of the columns that a text runs over until it fits. */
+  private void stretch() {
+    for (int row = 0; row < grid.rows().size(); row++) {
+      for (int i = 0; i < widths.length; i++) {
+        int end = i + grid.reach(row, i);
+        int text = TextWidth.of(shown(grid.columns().get(i), row));
+        widths[end - 1] += Math.max(0, text - width(i, end));
+      }
     }
-    return total;
+  }
+
+  private int total() {
+    return indent.length() + width(0, widths.length);
   }
 
   /** Makes the widest columns of text narrower until the table fits or none can give way. */

@@ -143,12 +143,19 @@ final class RelationMathMl {
 
   private void setAmount(Amount amount) {
     Figure figure = Figure.of(amount.quantity(), amount.digits());
-    number(figure.number());
-    if (!figure.unit().isEmpty()) {
+    number(figure.digits());
+    if (figure.power() != 0) {
+      operator("×");
+      out.append("<msup><mn>10</mn><mrow>");
+      ghost("^");
+      number(Integer.toString(figure.power()));
+      out.append("</mrow></msup>");
+    }
+    if (figure.unit().isApart()) {
       out.append("<mspace width=\"0.2em\"></mspace>");
       ghost(" ");
-      out.append("<mtext>").append(Escape.html(figure.unit())).append("</mtext>");
     }
+    out.append("<mtext>").append(Escape.html(figure.unit().text())).append("</mtext>");
   }
 
   private void setSum(Sum sum) {

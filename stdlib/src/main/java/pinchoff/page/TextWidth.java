@@ -62,6 +62,9 @@ final class TextWidth {
 
   /** Breaks a text at spaces; a word that is too long for a line is cut. */
   static List<String> wrapped(String text, int width) {
+    if (of(text) <= width) {
+      return List.of(text);
+    }
     List<String> lines = new ArrayList<>();
     StringBuilder line = new StringBuilder();
     int used = 0;

@@ -5,7 +5,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
-import pinchoff.quantity.Dimension;
 import pinchoff.quantity.Engineering;
 import pinchoff.quantity.Limits;
 import pinchoff.quantity.Quantity;
@@ -20,12 +19,17 @@ final class ValuesJson {
   static Map<String, Object> of(ValuesSheet sheet) {
     Map<String, Object> tree = new LinkedHashMap<>();
     tree.put("version", VERSION);
-    sheet
-        .completeness()
-        .ifPresent(c -> tree.put("completeness", Map.of("done", c.done(), "of", c.of())));
+    sheet.completeness().ifPresent(c -> tree.put("completeness", completeness(c)));
     tree.put("premises", sheet.premises().stream().map(ValuesJson::premise).toList());
     tree.put("technologies", sheet.technologies().stream().map(ValuesJson::technology).toList());
     tree.put("values", sheet.values().stream().map(ValuesJson::value).toList());
+    return tree;
+  }
+
+  private static Map<String, Object> completeness(ValuesSheet.Completeness completeness) {
+    Map<String, Object> tree = new LinkedHashMap<>();
+    tree.put("done", completeness.done());
+    tree.put("of", completeness.of());
     return tree;
   }
 
@@ -82,7 +86,7 @@ final class ValuesJson {
 
   private static void putSi(Map<String, Object> tree, String key, Quantity quantity) {
     tree.put(key, SiNumber.of(quantity.si()));
-    tree.put("dimension", text(quantity.dimension()));
+    tree.put("dimension", quantity.dimension().toString());
   }
 
   private static Map<String, Object> tolerance(Tolerance tolerance) {
@@ -113,10 +117,6 @@ final class ValuesJson {
     tree.put("input", Escape.cleaned(input));
     putSi(tree, "value", derivative);
     return tree;
-  }
-
-  private static String text(Dimension dimension) {
-    return dimension.toString();
   }
 
   private static String lowerCase(Enum<?> constant) {
