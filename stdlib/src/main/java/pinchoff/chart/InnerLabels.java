@@ -140,10 +140,14 @@ final class InnerLabels {
         {at[0] + gap, at[1] - ROW / 2},
         {at[0] - gap - width, at[1] - ROW - 1},
         {at[0] + gap, at[1] + 1},
+        {at[0] + gap, at[1] - ROW - 1},
+        {at[0] - gap - width, at[1] + 1},
         {at[0] - width / 2, at[1] - ROW - 2},
         {at[0] - width / 2, at[1] + 2},
         {at[0] - width - 1, at[1] - ROW - 2},
         {at[0] + 1, at[1] + 2},
+        {at[0] + 1, at[1] - ROW - 2},
+        {at[0] - width - 1, at[1] + 2},
       };
       for (double[] corner : corners) {
         Rect area = new Rect(corner[0], corner[1], width, ROW);

@@ -20,7 +20,7 @@ final class Layout {
   private static final Style STYLE = Style.STANDARD;
   private static final double EDGE = 12;
   private static final double TITLE = 24;
-  private static final double AXIS_TITLE = 22;
+  private static final double AXIS_TITLE = 26;
   private static final double BETWEEN = 10;
   private static final double TICKS = AxisArt.TICK + AxisArt.GAP + 14;
   private static final double ROOM_LEVEL = 42;
@@ -155,7 +155,7 @@ final class Layout {
       TextLine xTitle = AxisArt.title(chart.x(), marks);
       if (!xTitle.isEmpty()) {
         title(xTitle, STYLE.text(), (plotLeft + plotRight) / 2, y + STYLE.text(), Anchor.MIDDLE);
-        y += AXIS_TITLE - 2;
+        y += AXIS_TITLE - 6;
       }
       return key(y, top)
           .map(
@@ -212,7 +212,7 @@ final class Layout {
 
     private void verticalTitles(int index, Rect plot) {
       Panel panel = chart.panels().get(index);
-      double baseline = plot.y() - 8;
+      double baseline = plot.y() - 11;
       TextLine own = AxisArt.title(panel.left(), left.get(index));
       double half = panel.right().isPresent() ? (chart.width() - 3 * EDGE) / 2 : chart.width();
       title(own.within(half, STYLE.text()), STYLE.text(), EDGE, baseline, Anchor.START);

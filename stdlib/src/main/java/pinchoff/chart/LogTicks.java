@@ -15,7 +15,9 @@ import pinchoff.quantity.Unit;
  * nA"); pure numbers and units that take no prefix have powers of ten.
  */
 final class LogTicks {
-  private static final double FINE_ROOM = 30;
+  private static final double FINE_ROOM = 45;
+  private static final double MOST_ROOM = 60;
+  private static final int THOUSAND = 3;
   private static final int PLAIN_FROM = -3;
   private static final int PLAIN_TO = 4;
 
@@ -75,7 +77,8 @@ final class LogTicks {
 
   /** The values that bear a label. */
   private List<Double> labelled() {
-    int every = Math.max(1, (int) Math.ceil(room / decadeLength));
+    int needed = (int) Math.ceil(Math.min(room, MOST_ROOM) / decadeLength);
+    int every = needed <= 1 ? 1 : THOUSAND * Math.floorDiv(needed + THOUSAND - 1, THOUSAND);
     double halfway = decadeLength * StrictMath.log10(2); // from 1 to 2, the closest of 1, 2, 5
     int[] within = halfway > room ? new int[] {1, 2, 5} : new int[] {1};
     List<Double> values = new ArrayList<>();

@@ -21,9 +21,6 @@ final class Looks {
   private static final List<Dash> DASHES =
       List.of(Dash.SOLID, Dash.LONG, Dash.DOT_STROKE, Dash.TWO_DOTS, Dash.DOTS);
 
-  /** Order of the palette for areas: light colours first. */
-  private static final int[] AREAS = {5, 4, 2, 3, 6, 0, 1};
-
   private final boolean namesAtEnds;
   private final Map<String, Integer> lines = new HashMap<>();
   private final Map<String, Integer> families = new HashMap<>();
@@ -51,7 +48,7 @@ final class Looks {
       return new Look(Palette.colour(index), Dash.SOLID);
     } else if (item instanceof Region region) {
       int index = index(areas, region.name());
-      return new Look(Palette.colour(AREAS[index % AREAS.length]), Dash.SOLID);
+      return new Look(Palette.area(index), Dash.SOLID);
     }
     Colour accent = Style.STANDARD.accent();
     return new Look(accent, item instanceof Guide ? Dash.DOTS : Dash.SHORT);

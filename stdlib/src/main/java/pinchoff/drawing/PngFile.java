@@ -19,7 +19,7 @@ final class PngFile {
   private PngFile() {}
 
   static byte[] of(BufferedImage image) {
-    int[] pixels = ((DataBufferInt) image.getRaster().getDataBuffer()).getData();
+    int[] pixels = pixels(image);
     ColourTable table = ColourTable.of(pixels);
     int width = image.getWidth();
     int height = image.getHeight();
@@ -41,6 +41,15 @@ final class PngFile {
     chunk(out, "IDAT", deflated(rows(pixels, width, height, table)));
     chunk(out, "IEND", new byte[0]);
     return out.toByteArray();
+  }
+
+  /** Red, green and blue of each pixel; the unused bits of an image may hold anything. */
+  private static int[] pixels(BufferedImage image) {
+    int[] pixels = ((DataBufferInt) image.getRaster().getDataBuffer()).getData();
+    for (int i = 0; i < pixels.length; i++) {
+      pixels[i] &= 0xFFFFFF;
+    }
+    return pixels;
   }
 
   /** Each row begins with the number of its filter: none. */
