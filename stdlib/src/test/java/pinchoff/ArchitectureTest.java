@@ -28,8 +28,8 @@ class ArchitectureTest {
           "numeric",
           "quantity",
           "page",
-          "chart",
           "drawing",
+          "chart",
           "formula",
           "device",
           "technology",
@@ -46,8 +46,7 @@ class ArchitectureTest {
           Map.of(
               "org.hipparchus..", "numeric",
               "tools.jackson..", "technology",
-              "org.knowm.xchart..", "chart",
-              "java.awt..", "chart"));
+              "java.awt..", "drawing"));
 
   private static final JavaClasses CLASSES =
       new ClassFileImporter()
