@@ -1,5 +1,7 @@
 package pinchoff.device;
 
+import pinchoff.quantity.Quantity;
+
 /**
  * A kind of transistor of a process: parameters, rules, ratings, and where they come from.
  *
@@ -30,6 +32,17 @@ public record Device(
   /** n or p. */
   public Polarity polarity() {
     return parameters.polarity();
+  }
+
+  /**
+   * A transistor of this kind: one unit device, by the square law, at the nominal temperature.
+   *
+   * @param width drawn W
+   * @param length drawn L
+   * @throws DeviceException if a size is not above zero or below the minimum of the process
+   */
+  public Transistor sized(Quantity width, Quantity length) {
+    return Transistor.of(this, width, length);
   }
 
   @Override

@@ -2,7 +2,10 @@
  * MOS transistors: what a process says of them, how they are sized and biased, and what flows.
  *
  * <p>A {@link pinchoff.device.Device} holds the {@link pinchoff.device.DeviceParameters} of a
- * process with its rules and ratings.
+ * process with its rules and ratings; {@link pinchoff.device.Device#sized sized} makes a {@link
+ * pinchoff.device.Transistor}, and {@link pinchoff.device.Transistor#at at} biases it and gives an
+ * {@link pinchoff.device.OperatingPoint}. The current comes from a {@link
+ * pinchoff.device.ChannelModel}: equations on plain numbers in SI units with exact derivatives.
  *
  * <p><b>Signs.</b> For an n device V_GS, V_DS, V_SB and I_D are positive in normal operation; for a
  * p device V_SG, V_SD, V_BS and I_D are, and results are labelled with those symbols. Thresholds in
