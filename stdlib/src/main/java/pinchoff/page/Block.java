@@ -1,0 +1,13 @@
+package pinchoff.page;
+
+/** What stands on a line of its own in a page. */
+public sealed interface Block
+    permits Heading,
+        Prose,
+        RelationBlock,
+        Table,
+        PictureBlock,
+        VerdictBlock,
+        CautionBlock,
+        TrustLine,
+        Fold {}

@@ -1,0 +1,4 @@
+package pinchoff.page;
+
+/** A paragraph. */
+public record Prose(Phrase text) implements Block {}
