@@ -63,11 +63,7 @@ public final class KernelProcess implements AutoCloseable {
     }
     LastLines log = new LastLines(process.getInputStream(), onLine);
     KernelProcess kernel = new KernelProcess(process, file, log, KernelClient.connect(connection));
-<<<<<<< HEAD
     kernel.watch();
-=======
-    process.onExit().thenRun(kernel::ended);
->>>>>>> protocol2
     boolean answered = false;
     try {
       kernel.client.kernelInfo(limit);
@@ -138,7 +134,6 @@ public final class KernelProcess implements AutoCloseable {
     }
   }
 
-<<<<<<< HEAD
   private void watch() {
     Thread watcher = new Thread(this::awaitEnd, "pinchoff-kernel-watch");
     watcher.setDaemon(true);
@@ -152,13 +147,6 @@ public final class KernelProcess implements AutoCloseable {
     } catch (InterruptedException e) {
       Thread.currentThread().interrupt();
       return;
-=======
-  private void ended() {
-    try {
-      log.awaitEnd(Duration.ofMillis(500));
-    } catch (InterruptedException e) {
-      Thread.currentThread().interrupt();
->>>>>>> protocol2
     }
     List<String> lines = log.lines();
     client.abandon(

@@ -61,7 +61,7 @@ final class NewConnection {
     List<ServerSocket> held = new ArrayList<>();
     try {
       for (Channel channel : Channel.values()) {
-        ServerSocket socket = new ServerSocket(0, 1, InetAddress.getByName(LOOPBACK));
+        ServerSocket socket = new ServerSocket(0, 1, InetAddress.getLoopbackAddress());
         held.add(socket);
         ports.put(channel, socket.getLocalPort());
       }
