@@ -96,7 +96,7 @@ public final class KernelClient implements AutoCloseable {
               asked -> {
                 String answer =
                     listener.input(asked.prompt(), asked.password()).orElse(Protocol.END_OF_INPUT);
-                sockets.send(Channel.STDIN, messages.reply(message, new InputReply(answer)));
+                sockets.send(Channel.STDIN, messages.request(new InputReply(answer)));
               }));
     }
   }

@@ -15,7 +15,7 @@ import java.time.Duration;
  *     (default 16 MiB)
  * @param streamChunk printed characters that go into one message at most (default 131 072)
  * @param displayChars most characters of one displayed result, all forms together; a larger one is
- *     replaced by a note (default 48 Mi)
+ *     replaced by a note (default 10 Mi)
  * @param queueBytes bytes that may wait to be broadcast before whoever produces them has to wait
  *     (default 32 MiB)
  * @param subscriberMessages messages kept for a subscriber that does not read (default 256)
@@ -52,7 +52,7 @@ public record Limits(
           65_536,
           16 * MIB,
           131_072,
-          48 * MIB,
+          10 * MIB,
           32 * MIB,
           256,
           10_000,

@@ -6,6 +6,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Executors;
 import java.util.concurrent.ScheduledExecutorService;
+import java.util.function.Supplier;
 import pinchoff.display.MimeBundle;
 import pinchoff.kernel.eval.Cell;
 import pinchoff.kernel.eval.CellEvaluator;
@@ -49,12 +50,20 @@ final class Executions implements AutoCloseable {
    *
    * @return the requests that waited when it failed and must be dealt with now, in order
    */
-  List<Request> run(Request request, ExecuteRequest asked, CellEvaluator evaluator) {
+  List<Request> run(Request request, ExecuteRequest asked, Supplier<CellEvaluator> evaluators) {
     String started = outbox.messages().now();
     if (asked.code().isBlank()) {
-      outbox.reply(Channel.SHELL, request, new ExecuteReply(count, Map.of(), List.of()), started);
+      RequestOutput output = new RequestOutput(request, asked, outbox, questions, limits, timer);
+      Map<String, Object> expressions =
+          asked.userExpressions().isEmpty()
+              ? Map.of()
+              : express(asked.userExpressions(), evaluators.get(), output);
+      output.flush();
+      outbox.reply(
+          Channel.SHELL, request, new ExecuteReply(count, expressions, List.of()), started);
       return List.of();
     }
+    CellEvaluator evaluator = evaluators.get();
     int number = asked.storeHistory() ? ++count : count;
     RequestOutput output = new RequestOutput(request, asked, outbox, questions, limits, timer);
     output.send(new ExecuteInput(asked.code(), number));
@@ -81,8 +90,10 @@ final class Executions implements AutoCloseable {
   }
 
   /** Replies to a cell that cannot be run at all. */
-  void refuse(Request request, ErrorInfo error) {
-    outbox.broadcast(request.header(), new ErrorOutput(error));
+  void refuse(Request request, ExecuteRequest asked, ErrorInfo error) {
+    if (!asked.silent()) {
+      outbox.broadcast(request.header(), new ErrorOutput(error));
+    }
     outbox.reply(Channel.SHELL, request, new ErrorReply(REPLY, error, Optional.of(count)));
   }
 

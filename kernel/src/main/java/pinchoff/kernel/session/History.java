@@ -8,7 +8,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import pinchoff.kernel.protocol.HistoryReply;
 import pinchoff.kernel.protocol.HistoryRequest;
@@ -61,10 +60,9 @@ final class History {
   }
 
   private List<Entry> search(HistoryRequest asked) {
-    Pattern pattern = glob(asked.pattern());
     List<Entry> found = new ArrayList<>();
     for (Entry entry : entries) {
-      if (pattern.matcher(entry.input()).matches()) {
+      if (Glob.matches(asked.pattern(), entry.input())) {
         found.add(entry);
       }
     }
@@ -83,21 +81,5 @@ final class History {
 
   private static List<Entry> last(List<Entry> found, int n) {
     return found.subList(Math.max(0, found.size() - Math.max(0, n)), found.size());
-  }
-
-  private static Pattern glob(String pattern) {
-    StringBuilder regex = new StringBuilder();
-    for (int i = 0; i < pattern.length(); i++) {
-      char c = pattern.charAt(i);
-      if (c == '*') {
-        // Possessive on a run of stars: without it, many stars take exponential time.
-        if (regex.length() == 0 || i == 0 || pattern.charAt(i - 1) != '*') {
-          regex.append(".*");
-        }
-      } else {
-        regex.append(c == '?' ? "." : Pattern.quote(String.valueOf(c)));
-      }
-    }
-    return Pattern.compile(regex.toString(), Pattern.DOTALL);
   }
 }

@@ -4,9 +4,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
-import java.util.concurrent.CompletionException;
 import java.util.function.Consumer;
-import java.util.function.Function;
 import java.util.function.Supplier;
 import pinchoff.kernel.eval.CellEvaluator;
 import pinchoff.kernel.limits.Limits;
@@ -14,6 +12,7 @@ import pinchoff.kernel.protocol.AbortedReply;
 import pinchoff.kernel.protocol.CommClose;
 import pinchoff.kernel.protocol.CommInfoReply;
 import pinchoff.kernel.protocol.CommInfoRequest;
+import pinchoff.kernel.protocol.CommMsg;
 import pinchoff.kernel.protocol.CommOpen;
 import pinchoff.kernel.protocol.CompleteRequest;
 import pinchoff.kernel.protocol.Content;
@@ -32,6 +31,7 @@ import pinchoff.kernel.protocol.ShutdownReply;
 import pinchoff.kernel.protocol.ShutdownRequest;
 import pinchoff.kernel.protocol.Status;
 import pinchoff.kernel.wire.Channel;
+import pinchoff.kernel.wire.WireException;
 
 /**
  * One session of a kernel: answers every request, with busy before and idle after it.
@@ -39,7 +39,7 @@ import pinchoff.kernel.wire.Channel;
  * <p>{@link #shell} is called by one thread, {@link #control} by another, {@link #input} by any.
  */
 public final class KernelSession implements AutoCloseable {
-  private final CompletableFuture<CellEvaluator> evaluator;
+  private final EvaluatorGate evaluator;
   private final Outbox outbox;
   private final Questions questions;
   private final Executions executions;
@@ -64,7 +64,7 @@ public final class KernelSession implements AutoCloseable {
       Limits limits,
       Consumer<String> log,
       Runnable onShutdown) {
-    this.evaluator = evaluator;
+    this.evaluator = new EvaluatorGate(evaluator);
     this.outbox = new Outbox(messages, port);
     this.questions = new Questions(outbox);
     this.history = new History(limits.historyEntries());
@@ -123,51 +123,46 @@ public final class KernelSession implements AutoCloseable {
       return execute(request, asked);
     }
     if (content instanceof CompleteRequest asked) {
-      answer(request, e -> HelpRequests.complete(asked, e));
+      answer(request, () -> HelpRequests.complete(asked, evaluator.await()));
     } else if (content instanceof InspectRequest asked) {
-      answer(request, e -> HelpRequests.inspect(asked, e));
+      answer(request, () -> HelpRequests.inspect(asked, evaluator.await()));
     } else if (content instanceof IsCompleteRequest asked) {
-      answer(request, e -> HelpRequests.isComplete(asked, e));
+      answer(request, () -> HelpRequests.isComplete(asked, evaluator.await()));
     } else if (content instanceof HistoryRequest asked) {
-      outbox.reply(Channel.SHELL, request, history.answer(asked));
+      answer(request, () -> history.answer(asked));
     } else if (content instanceof KernelInfoRequest) {
-      outbox.reply(Channel.SHELL, request, KernelInfo.reply());
+      answer(request, KernelInfo::reply);
     } else if (content instanceof CommInfoRequest) {
-      outbox.reply(Channel.SHELL, request, new CommInfoReply(Map.of()));
+      answer(request, () -> new CommInfoReply(Map.of()));
     } else if (content instanceof CommOpen open) {
       // No targets are known here: whoever opens a channel is told that it is closed.
       outbox.broadcast(request.header(), new CommClose(open.commId(), Map.of()));
     } else if (content instanceof ShutdownRequest asked) {
-      outbox.reply(Channel.SHELL, request, new ShutdownReply(asked.restart()));
-    } else if (!request.message().header().type().startsWith("comm_")) {
-      log.accept("shell: unknown message type " + request.message().header().type());
+      answer(request, () -> new ShutdownReply(asked.restart()));
+    } else if (!(content instanceof CommMsg || content instanceof CommClose)) {
+      refuse(Channel.SHELL, request);
     }
     return List.of();
   }
 
   private List<Request> execute(Request request, ExecuteRequest asked) {
     try {
-      return executions.run(request, asked, evaluator.join());
-    } catch (CompletionException e) {
-      Throwable cause = e.getCause() == null ? e : e.getCause();
-      executions.refuse(
-          request,
-          new ErrorInfo(
-              "KernelNotReady",
-              "Java cells cannot be run: " + cause,
-              List.of("Java cells cannot be run: " + cause)));
-    } catch (RuntimeException e) {
-      log.accept("a cell failed inside the kernel: " + e);
-      executions.refuse(request, ErrorInfo.of(e));
+      return executions.run(request, asked, evaluator::await);
+    } catch (Throwable e) {
+      // Errors too: a full stack or memory must not end the thread that serves every request.
+      if (!(e instanceof EvaluatorGate.NotReadyException)) {
+        log.accept("a cell failed inside the kernel: " + WireException.printable(e.toString()));
+      }
+      executions.refuse(request, asked, ErrorInfo.of(e));
     }
     return List.of();
   }
 
-  private void answer(Request request, Function<CellEvaluator, Content> work) {
+  private void answer(Request request, Supplier<Content> work) {
     Content reply;
     try {
-      reply = work.apply(evaluator.join());
-    } catch (RuntimeException e) {
+      reply = work.get();
+    } catch (Throwable e) {
       String type = Protocol.replyType(request.message().header().type());
       reply = new ErrorReply(type, ErrorInfo.of(e), Optional.empty());
     }
@@ -177,17 +172,23 @@ public final class KernelSession implements AutoCloseable {
   private void answerControl(Request request) {
     Content content = request.content();
     if (content instanceof InterruptRequest) {
-      if (evaluator.isDone() && !evaluator.isCompletedExceptionally()) {
-        evaluator.join().interrupt();
-      }
+      questions.interrupt();
+      evaluator.interrupt();
       outbox.reply(Channel.CONTROL, request, new InterruptReply());
     } else if (content instanceof KernelInfoRequest) {
       outbox.reply(Channel.CONTROL, request, KernelInfo.reply());
     } else if (content instanceof ShutdownRequest asked) {
       outbox.reply(Channel.CONTROL, request, new ShutdownReply(asked.restart()));
     } else {
-      log.accept("control: unknown message type " + request.message().header().type());
+      refuse(Channel.CONTROL, request);
     }
+  }
+
+  private void refuse(Channel channel, Request request) {
+    log.accept(
+        channel.label()
+            + ": unknown message type "
+            + WireException.printable(request.message().header().type()));
   }
 
   private void endIfAsked(Request request) {

@@ -1,6 +1,5 @@
 package pinchoff.kernel.session;
 
-import java.nio.charset.StandardCharsets;
 import java.util.concurrent.ScheduledExecutorService;
 import java.util.concurrent.TimeUnit;
 import java.util.function.BiConsumer;
@@ -23,6 +22,7 @@ final class StreamBuffer {
 
   private Stream stream = Stream.OUT;
   private boolean scheduled;
+  private boolean full;
   private long bytes;
 
   StreamBuffer(
@@ -34,37 +34,56 @@ final class StreamBuffer {
   }
 
   void write(Stream to, String printed) {
-    if (printed.isEmpty() || bytes > limits.streamBytes()) {
+    if (printed.isEmpty() || full) {
       return;
     }
     if (to != stream) {
       flush();
       stream = to;
     }
-    bytes += printed.length() < 1024 * 1024 ? utf8Length(printed) : printed.length();
-    if (bytes > limits.streamBytes()) {
+    int end = withinLimit(printed);
+    append(printed, end);
+    if (end < printed.length()) {
+      full = true;
       flush();
       send.accept(
           Stream.ERR,
-          "\n[the cell has printed more than "
-              + limits.streamBytes() / (1024 * 1024)
-              + " MiB: what it prints from here on is not shown]\n");
-      return;
+          "\n[the cell has printed "
+              + limits.streamBytes()
+              + " bytes: what it prints from here on is not shown]\n");
+    } else if (text.length() > 0 && !scheduled) {
+      scheduled = true;
+      var unused =
+          timer.schedule(this::onTime, limits.streamDelay().toMillis(), TimeUnit.MILLISECONDS);
     }
-    text.append(printed);
-    while (text.length() >= limits.streamChunk()) {
-      int end = limits.streamChunk();
-      if (Character.isHighSurrogate(text.charAt(end - 1))) {
-        end--;
+  }
+
+  /** How much of a text may still be sent, as an end that splits no character. */
+  private int withinLimit(String printed) {
+    int end = 0;
+    while (end < printed.length()) {
+      int point = printed.codePointAt(end);
+      bytes += point < 0x80 ? 1 : point < 0x800 ? 2 : point < 0x10000 ? 3 : 4;
+      if (bytes > limits.streamBytes()) {
+        return end;
       }
-      send.accept(stream, text.substring(0, end));
-      text.delete(0, end);
+      end += Character.charCount(point);
     }
-    if (text.length() > 0 && !scheduled) {
-      scheduled =
-          !timer
-              .schedule(this::onTime, limits.streamDelay().toMillis(), TimeUnit.MILLISECONDS)
-              .isCancelled();
+    return end;
+  }
+
+  private void append(String printed, int end) {
+    int start = 0;
+    while (start < end) {
+      int next = Math.min(end, start + limits.streamChunk() - text.length());
+      if (next < end && Character.isHighSurrogate(printed.charAt(next - 1))) {
+        next--;
+      }
+      text.append(printed, start, next);
+      start = next;
+      if (start < end || text.length() >= limits.streamChunk()) {
+        flush();
+      }
     }
   }
 
@@ -80,9 +99,5 @@ final class StreamBuffer {
       scheduled = false;
       flush();
     }
-  }
-
-  private static int utf8Length(String text) {
-    return text.getBytes(StandardCharsets.UTF_8).length;
   }
 }

@@ -53,8 +53,14 @@ final class BroadcastLoop implements Runnable {
     this.log = log;
     this.welcome =
         topic -> wire.encode(messages.broadcast(topic, Map.of(), new IopubWelcome(topic)));
-    this.socket = Sockets.bind(context, SocketType.XPUB, Channel.IOPUB, connection, limits);
-    socket.setSndHWM(limits.subscriberMessages());
+    this.socket =
+        Sockets.bind(
+            context,
+            SocketType.XPUB,
+            Channel.IOPUB,
+            connection,
+            limits,
+            limits.subscriberMessages());
     // Without this only the first of several equal subscriptions would be seen and welcomed.
     socket.setXpubVerbose(true);
     socket.setXpubNoDrop(true);
@@ -105,7 +111,9 @@ final class BroadcastLoop implements Runnable {
   }
 
   private void welcomeAll() {
-    for (var event = Sockets.receive(socket); !event.isEmpty(); event = Sockets.receive(socket)) {
+    for (var event = Sockets.receive(socket, limits);
+        !event.isEmpty();
+        event = Sockets.receive(socket, limits)) {
       topicOf(event.get(0)).ifPresent(topic -> deliver(welcome.apply(topic)));
     }
   }

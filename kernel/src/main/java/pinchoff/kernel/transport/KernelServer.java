@@ -27,6 +27,7 @@ import pinchoff.kernel.session.Request;
 import pinchoff.kernel.wire.Channel;
 import pinchoff.kernel.wire.ConnectionInfo;
 import pinchoff.kernel.wire.Message;
+import pinchoff.kernel.wire.WireException;
 import pinchoff.kernel.wire.WireFormat;
 
 /**
@@ -83,7 +84,7 @@ public final class KernelServer implements MessagePort, AutoCloseable {
                   Channel.STDIN, this::input),
               log);
       ZMQ.Socket heartbeat =
-          Sockets.bind(context, SocketType.REP, Channel.HEARTBEAT, connection, limits);
+          Sockets.bind(context, SocketType.REP, Channel.HEARTBEAT, connection, limits, 100);
       CompletableFuture<CellEvaluator> ready = new CompletableFuture<>();
       this.session = new KernelSession(ready, messages, this, limits, log, ended::countDown);
       this.broadcastThread = start("pinchoff-iopub", broadcasts);
@@ -121,7 +122,8 @@ public final class KernelServer implements MessagePort, AutoCloseable {
     join(broadcastThread, deadline);
     join(requestThread, deadline);
     session.close();
-    context.close();
+    // A thread that is stuck in a socket must not hold up the end of the process.
+    join(start("pinchoff-close", context::close), deadline);
   }
 
   @Override
@@ -167,8 +169,9 @@ public final class KernelServer implements MessagePort, AutoCloseable {
         Request request = queue.take();
         try {
           handler.accept(request);
-        } catch (RuntimeException e) {
-          log.accept(request.message().header().type() + ": " + e);
+        } catch (Throwable e) {
+          // Errors too: these two threads serve every request.
+          log.accept(WireException.printable(request.message().header().type() + ": " + e));
         }
       }
     } catch (InterruptedException e) {

@@ -7,7 +7,6 @@ import java.util.function.Consumer;
 import org.zeromq.SocketType;
 import org.zeromq.ZContext;
 import org.zeromq.ZMQ;
-import pinchoff.kernel.json.JsonException;
 import pinchoff.kernel.limits.Limits;
 import pinchoff.kernel.session.Request;
 import pinchoff.kernel.wire.Channel;
@@ -22,6 +21,9 @@ final class RequestLoop implements Runnable {
       List.of(Channel.SHELL, Channel.CONTROL, Channel.STDIN);
 
   private final ZContext context;
+  private static final int MESSAGES_KEPT = 1000;
+
+  private final Limits limits;
   private final Map<Channel, ZMQ.Socket> sockets;
   private final WireFormat wire;
   private final Map<Channel, Consumer<Request>> receivers;
@@ -40,6 +42,7 @@ final class RequestLoop implements Runnable {
       Map<Channel, Consumer<Request>> receivers,
       Consumer<String> log) {
     this.context = context;
+    this.limits = limits;
     this.wire = wire;
     this.receivers = receivers;
     this.log = log;
@@ -51,8 +54,8 @@ final class RequestLoop implements Runnable {
   }
 
   private ZMQ.Socket router(Channel channel, ConnectionInfo connection, Limits limits) {
-    ZMQ.Socket socket = Sockets.bind(context, SocketType.ROUTER, channel, connection, limits);
-    socket.setHWM(0);
+    ZMQ.Socket socket =
+        Sockets.bind(context, SocketType.ROUTER, channel, connection, limits, MESSAGES_KEPT);
     // A front end that comes back under its old name takes over from its former self.
     socket.setRouterHandover(true);
     if (channel == Channel.STDIN) {
@@ -115,9 +118,9 @@ final class RequestLoop implements Runnable {
 
   private void receiveAll(Channel channel) {
     ZMQ.Socket socket = socket(channel);
-    for (var frames = Sockets.receive(socket);
+    for (var frames = Sockets.receive(socket, limits);
         !frames.isEmpty();
-        frames = Sockets.receive(socket)) {
+        frames = Sockets.receive(socket, limits)) {
       receive(channel, frames);
     }
   }
@@ -126,8 +129,11 @@ final class RequestLoop implements Runnable {
     try {
       Request request = Request.of(wire.decode(frames));
       receivers.getOrDefault(channel, ignored -> {}).accept(request);
-    } catch (WireException | JsonException e) {
-      log.accept(channel.label() + ": dropped a message: " + e.getMessage());
+    } catch (WireException | RuntimeException e) {
+      log.accept(
+          channel.label()
+              + ": dropped a message: "
+              + WireException.printable(String.valueOf(e.getMessage())));
     }
   }
 
@@ -142,7 +148,9 @@ final class RequestLoop implements Runnable {
         receiveAll(letter.channel());
         letter.done().complete(true);
       } else {
-        letter.done().complete(Sockets.send(socket(letter.channel()), letter.frames(), 0));
+        letter
+            .done()
+            .complete(Sockets.send(socket(letter.channel()), letter.frames(), ZMQ.DONTWAIT));
       }
     }
     return true;

@@ -22,6 +22,7 @@ final class Sockets {
   /**
    * A socket of the kernel, bound to its channel's address.
    *
+   * @param messagesKept how many messages wait for, and from, each peer at most
    * @throws ConnectionException if the address cannot be had, with the reason
    */
   static ZMQ.Socket bind(
@@ -29,8 +30,11 @@ final class Sockets {
       SocketType type,
       Channel channel,
       ConnectionInfo connection,
-      Limits limits) {
+      Limits limits,
+      int messagesKept) {
     ZMQ.Socket socket = context.createSocket(type);
+    // Options of this kind only hold for addresses that are bound afterwards.
+    socket.setHWM(messagesKept);
     socket.setLinger((int) limits.shutdown().toMillis());
     socket.setMaxMsgSize(limits.frameBytes());
     connection.curve().ifPresent(keys -> encrypt(socket, keys));
@@ -71,7 +75,7 @@ final class Sockets {
   }
 
   /** The frames of the next message, or an empty list if none has come. */
-  static List<byte[]> receive(ZMQ.Socket socket) {
+  static List<byte[]> receive(ZMQ.Socket socket, Limits limits) {
     byte @Nullable [] first = socket.recv(ZMQ.DONTWAIT);
     if (first == null) {
       return List.of();
@@ -80,7 +84,8 @@ final class Sockets {
     frames.add(first);
     while (socket.hasReceiveMore()) {
       byte @Nullable [] next = socket.recv();
-      if (next != null) {
+      // One more than allowed shows that there were too many; the rest is not worth its memory.
+      if (next != null && frames.size() <= limits.frames()) {
         frames.add(next);
       }
     }
