@@ -23,8 +23,9 @@ final class CellSplitter {
     String code = cell.code();
     int at = 0;
     while (at < code.length()) {
-      String rest = windowFrom(code, at);
-      CompletionInfo info = analysis.analyzeCompletion(rest);
+      Window window = windowFrom(code, at);
+      String rest = window.text();
+      CompletionInfo info = window.info();
       if (isEmpty(rest, info)) {
         break;
       }
@@ -46,11 +47,14 @@ final class CellSplitter {
     return units;
   }
 
+  /** A stretch of code and what the analyser says of its first unit. */
+  private record Window(String text, CompletionInfo info) {}
+
   /**
    * As much of the code as is needed to see where its first unit ends. The analyser reads all that
    * it is given for each unit, which a long cell would make slow.
    */
-  private String windowFrom(String code, int at) {
+  private Window windowFrom(String code, int at) {
     for (int size = FIRST_WINDOW; at + size < code.length(); size *= 4) {
       int cut = code.lastIndexOf('\n', at + size);
       if (cut <= at) {
@@ -61,10 +65,11 @@ final class CellSplitter {
       boolean nextSeen =
           info.completeness().isComplete() && !JavaText.masked(info.remaining()).isBlank();
       if (nextSeen) {
-        return window;
+        return new Window(window, info);
       }
     }
-    return code.substring(at);
+    String rest = code.substring(at);
+    return new Window(rest, analysis.analyzeCompletion(rest));
   }
 
   private static boolean isEmpty(String rest, CompletionInfo info) {

@@ -8,14 +8,17 @@ import jdk.jshell.Snippet;
  * A unit, or several in one block, after the compiler: nothing of it has run.
  *
  * @param steps what to run, in order
+ * @param snippets what the compiler knows it by
  * @param problems errors, in which case there is nothing to run, and warnings
  * @param notes what the reader should know of side effects on earlier declarations
  */
-record Compiled(List<Step> steps, List<CompileProblem> problems, List<String> notes) {
+record Compiled(
+    List<Step> steps, List<Snippet> snippets, List<CompileProblem> problems, List<String> notes) {
 
   /** Copies the lists. */
   Compiled {
     steps = List.copyOf(steps);
+    snippets = List.copyOf(snippets);
     problems = List.copyOf(problems);
     notes = List.copyOf(notes);
   }

@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.locks.ReentrantLock;
+import java.util.function.Consumer;
 import org.jspecify.annotations.Nullable;
 import pinchoff.display.Host;
 import pinchoff.display.MimeBundle;
@@ -18,6 +19,9 @@ public final class JShellEvaluator implements CellEvaluator {
   private final OutputRouter router = new OutputRouter();
   private final SnippetCompiler compiler;
   private final JavaParser parser = new JavaParser(SnippetCompiler.languageLevel());
+  private final Completer completer;
+  private final Inspector inspector;
+  private final Consumer<String> log;
   private final SessionHost host;
   private final Host previousHost;
   private final ErrorReport report;
@@ -29,6 +33,10 @@ public final class JShellEvaluator implements CellEvaluator {
 
   private JShellEvaluator(EvaluatorOptions options) {
     compiler = new SnippetCompiler(options.classPath(), JShellEvaluator.class.getClassLoader());
+    JavadocIndex library = new JavadocIndex(options.classPath(), parser);
+    completer = new Completer(compiler, library);
+    inspector = new Inspector(compiler, library);
+    log = options.log();
     report = new ErrorReport(compiler.frames());
     host = new SessionHost(compiler.variables(), options.premises());
     previousHost = Host.install(host);
@@ -107,17 +115,29 @@ public final class JShellEvaluator implements CellEvaluator {
 
   @Override
   public Completeness completeness(String code) {
-    return new Completeness(Completeness.Status.UNKNOWN, "");
+    return compiler.analyse(analysis -> CompletenessCheck.of(code, analysis));
   }
 
   @Override
   public Completions complete(String code, int cursor) {
-    return new Completions(cursor, cursor, List.of());
+    return completer.complete(code, clamp(cursor, code));
   }
 
   @Override
   public Optional<MimeBundle> inspect(String code, int cursor, int detail) {
-    return Optional.empty();
+    return inspector.inspect(code, clamp(cursor, code), detail);
+  }
+
+  private static int clamp(int cursor, String code) {
+    return Math.max(0, Math.min(cursor, code.length()));
+  }
+
+  /**
+   * Makes the first cells quick. To be called once, after the evaluator is created, on a thread of
+   * its own; stops early when a cell runs, and leaves nothing behind in the session.
+   */
+  public void warmUp() {
+    new WarmUp(compiler, parser, log, () -> running.isLocked() || running.hasQueuedThreads()).run();
   }
 
   @Override

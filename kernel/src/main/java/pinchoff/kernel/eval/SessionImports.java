@@ -1,12 +1,5 @@
 package pinchoff.kernel.eval;
 
-import java.io.IOException;
-import java.io.InputStream;
-import java.net.URL;
-import java.nio.charset.StandardCharsets;
-import java.util.ArrayList;
-import java.util.Collections;
-import java.util.List;
 import java.util.function.Consumer;
 
 /**
@@ -26,46 +19,19 @@ final class SessionImports {
 
   /** Evaluates all of them. A line that is no import, or names what is not there, is logged. */
   void preload() {
-    for (URL resource : resources()) {
-      List<String> lines = linesOf(resource);
-      for (int i = 0; i < lines.size(); i++) {
-        String line = lines.get(i).replaceFirst("#.*", "").strip();
-        if (!line.isEmpty()) {
-          preload(line, resource + ", line " + (i + 1));
-        }
-      }
-    }
+    ClassPathLines.of(compiler.loader(), RESOURCE, log).forEach(this::preload);
   }
 
-  private void preload(String line, String where) {
-    if (!line.startsWith("import ")) {
-      log.accept(where + ": expected an import statement, found \"" + line + "\"");
+  private void preload(ClassPathLines.Line line) {
+    if (!line.text().startsWith("import ")) {
+      log.accept(line.where() + ": expected an import statement, found \"" + line.text() + "\"");
       return;
     }
-    CellText text = new CellText("session imports", line.endsWith(";") ? line : line + ";");
-    Compiled compiled =
-        compiler.compile(new CellUnit(text, 0, text.code(), "", CellUnit.Kind.ALONE));
+    String code = line.text().endsWith(";") ? line.text() : line.text() + ";";
+    CellText text = new CellText("session imports", code);
+    Compiled compiled = compiler.compile(new CellUnit(text, 0, code, "", CellUnit.Kind.ALONE));
     for (CompileProblem problem : compiled.errors()) {
-      log.accept(where + ": " + problem.message());
-    }
-  }
-
-  private List<URL> resources() {
-    try {
-      return Collections.list(compiler.loader().getResources(RESOURCE));
-    } catch (IOException e) {
-      log.accept(RESOURCE + " cannot be found: " + e.getMessage());
-      return List.of();
-    }
-  }
-
-  private List<String> linesOf(URL resource) {
-    try (InputStream in = resource.openStream()) {
-      return new ArrayList<>(
-          new String(in.readAllBytes(), StandardCharsets.UTF_8).lines().toList());
-    } catch (IOException e) {
-      log.accept(resource + " cannot be read: " + e.getMessage());
-      return List.of();
+      log.accept(line.where() + ": " + problem.message());
     }
   }
 }

@@ -129,6 +129,9 @@ final class SnippetCompiler implements AutoCloseable {
   void drop(Snippet snippet) {
     lock.lock();
     try {
+      if (!shell.status(snippet).isActive()) {
+        return;
+      }
       shell.drop(snippet);
       origins.remove(snippet.id());
       if (snippet instanceof VarSnippet v) {
@@ -163,7 +166,9 @@ final class SnippetCompiler implements AutoCloseable {
         }
       }
       boolean failed = problems.stream().anyMatch(CompileProblem::error);
-      return new Compiled(failed ? List.of() : steps, problems, notes);
+      List<Snippet> snippets =
+          events.stream().filter(e -> e.causeSnippet() == null).map(SnippetEvent::snippet).toList();
+      return new Compiled(failed ? List.of() : steps, snippets, problems, notes);
     } finally {
       lock.unlock();
     }
