@@ -44,8 +44,8 @@ final class Cautions {
     return List.copyOf(c.found);
   }
 
-  private void add(String id, String text, Object... arguments) {
-    found.add(new Caution(id, text.formatted(arguments)));
+  private void add(String id, String text) {
+    found.add(new Caution(id, text));
   }
 
   private static Quantity volts(double value) {
@@ -56,9 +56,8 @@ final class Cautions {
     if (op.isSwapped()) {
       add(
           "swapped",
-          "The named drain acts as the source: %s between the named terminals is %s. Figures are those of the acting source.",
-          labels.drainSource(),
-          volts(-op.vds()));
+          "The named drain acts as the source: %s between the named terminals is %s. Figures are those of the acting source."
+              .formatted(labels.drainSource(), volts(-op.vds())));
     }
   }
 
@@ -74,10 +73,8 @@ final class Cautions {
                 : "its current is small but not in these figures";
     add(
         which,
-        "The %s junction (acting terminals) is forward biased by %s: %s.",
-        which,
-        volts(forward),
-        what);
+        "The %s junction (acting terminals) is forward biased by %s: %s."
+            .formatted(which, volts(forward), what));
   }
 
   private void ratings() {
@@ -96,9 +93,8 @@ final class Cautions {
             most ->
                 add(
                     "rating-power",
-                    "Rating exceeded: %s in each unit device, allowed is %s.",
-                    each,
-                    most));
+                    "Rating exceeded: %s in each unit device, allowed is %s."
+                        .formatted(each, most)));
   }
 
   private void rating(String name, Quantity a, Quantity b, Optional<Quantity> limit) {
@@ -109,10 +105,7 @@ final class Cautions {
             most ->
                 add(
                     "rating-" + name,
-                    "Rating exceeded: |%s| = %s, allowed is %s.",
-                    name,
-                    size,
-                    most));
+                    "Rating exceeded: |%s| = %s, allowed is %s.".formatted(name, size, most)));
   }
 
   private void oxideField() {
@@ -132,10 +125,11 @@ final class Cautions {
     if (field > FIELD_LIMIT) {
       add(
           "oxide-field",
-          "Field in the oxide: %s across %s is %s; the long-term limit is about 5 MV/cm.",
-          most,
-          Quantity.ofSi(thickness, Dimension.LENGTH),
-          Quantity.ofSi(field, Dimension.FIELD).to("MV/cm"));
+          "Field in the oxide: %s across %s is %s; the long-term limit is about 5 MV/cm."
+              .formatted(
+                  most,
+                  Quantity.ofSi(thickness, Dimension.LENGTH),
+                  Quantity.ofSi(field, Dimension.FIELD).to("MV/cm")));
     }
   }
 
@@ -145,17 +139,15 @@ final class Cautions {
     if (op.vov() > LARGE_OVERDRIVE && length < SHORT && t.model() instanceof SquareLaw) {
       add(
           "short-channel",
-          "V_OV = %s at L = %s: carriers reach their saturation velocity here, which the square law leaves out.",
-          volts(op.vov()),
-          t.effectiveLength());
+          "V_OV = %s at L = %s: carriers reach their saturation velocity here, which the square law leaves out."
+              .formatted(volts(op.vov()), t.effectiveLength()));
     }
     boolean other = !t.temperature().equals(t.device().parameters().nominalTemperature());
     if (other && t.device().parameters().temperatureCoefficients().isEmpty()) {
       add(
           "temperature",
-          "The parameters hold at %s and have no temperature coefficients: at %s only kT/q was changed.",
-          t.device().parameters().nominalTemperature(),
-          t.temperature());
+          "The parameters hold at %s and have no temperature coefficients: at %s only kT/q was changed."
+              .formatted(t.device().parameters().nominalTemperature(), t.temperature()));
     }
   }
 }

@@ -28,6 +28,8 @@ final class KernelCommand implements Callable<Integer> {
 
   private final Streams streams;
 
+  /** Read by nobody: with it there are three arguments, and {@link Pinchoff#end} lets Java exit. */
+  @SuppressWarnings("UnusedVariable")
   @Option(names = REHEARSAL, hidden = true)
   private boolean rehearsal;
 

@@ -22,29 +22,33 @@ final class Logo {
 
   private static final List<Shape> SHAPES =
       List.of(
-          new Shape("#173f5f", 0, 0, 64, 0, 64, 64, 0, 64),
-          new Shape("#f2f5f7", 14, 12, 50, 12, 50, 20, 14, 20),
-          new Shape("#8fb8d0", 14, 23, 50, 23, 50, 26, 14, 26),
-          new Shape("#f2f5f7", 4, 29, 16, 29, 16, 50, 4, 50),
-          new Shape("#f2f5f7", 48, 29, 60, 29, 60, 50, 48, 50),
-          new Shape("#f6a821", 16, 29, 42, 29, 16, 44));
+          Shape.of("#173f5f", 0, 0, 64, 0, 64, 64, 0, 64),
+          Shape.of("#f2f5f7", 14, 12, 50, 12, 50, 20, 14, 20),
+          Shape.of("#8fb8d0", 14, 23, 50, 23, 50, 26, 14, 26),
+          Shape.of("#f2f5f7", 4, 29, 16, 29, 16, 50, 4, 50),
+          Shape.of("#f2f5f7", 48, 29, 60, 29, 60, 50, 48, 50),
+          Shape.of("#f6a821", 16, 29, 42, 29, 16, 44));
 
   private Logo() {}
 
   /** A filled polygon: x and y of each corner in turn. */
-  private record Shape(String colour, int... corners) {
+  private record Shape(String colour, List<Integer> corners) {
+    static Shape of(String colour, Integer... corners) {
+      return new Shape(colour, List.of(corners));
+    }
+
     Polygon polygon() {
       Polygon polygon = new Polygon();
-      for (int i = 0; i < corners.length; i += 2) {
-        polygon.addPoint(corners[i], corners[i + 1]);
+      for (int i = 0; i < corners.size(); i += 2) {
+        polygon.addPoint(corners.get(i), corners.get(i + 1));
       }
       return polygon;
     }
 
     String svg() {
       String points =
-          IntStream.range(0, corners.length / 2)
-              .mapToObj(i -> corners[2 * i] + "," + corners[2 * i + 1])
+          IntStream.range(0, corners.size() / 2)
+              .mapToObj(i -> corners.get(2 * i) + "," + corners.get(2 * i + 1))
               .collect(Collectors.joining(" "));
       return String.format(Locale.ROOT, "  <polygon fill=\"%s\" points=\"%s\"/>\n", colour, points);
     }

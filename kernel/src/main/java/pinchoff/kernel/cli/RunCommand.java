@@ -123,7 +123,7 @@ final class RunCommand implements Callable<Integer> {
               "pinchoff: "
                   + Printable.line(argument)
                   + ": no kernel could be started: "
-                  + Printable.text(e.getMessage()));
+                  + Printable.text(String.valueOf(e.getMessage())));
       return ExitCode.FAULT;
     } catch (IOException | RuntimeException e) {
       return Pinchoff.explained(e, streams);

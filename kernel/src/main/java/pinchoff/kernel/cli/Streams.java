@@ -33,6 +33,7 @@ record Streams(PrintStream out, PrintStream err, boolean terminal) {
   }
 
   /** A console exists without a terminal from JDK 22 on, where it can be asked. */
+  @SuppressWarnings("SystemConsoleNull")
   private static boolean isTerminal() {
     java.io.Console console = System.console();
     if (console == null) {

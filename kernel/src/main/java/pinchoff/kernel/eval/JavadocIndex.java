@@ -149,7 +149,7 @@ final class JavadocIndex {
     @Override
     public @Nullable Void visitClass(ClassTree node, @Nullable Void p) {
       note(into.isEmpty() ? "" : node.getSimpleName().toString());
-      return super.visitClass(node, p);
+      return super.visitClass(node, null);
     }
 
     @Override

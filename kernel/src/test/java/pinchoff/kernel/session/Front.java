@@ -57,7 +57,7 @@ public abstract class Front implements AutoCloseable {
   public abstract List<String> log();
 
   @Override
-  public abstract void close() throws InterruptedException;
+  public abstract void close();
 
   /** To be called for each message that comes. */
   protected final synchronized void add(Channel channel, Message message, Content content) {
