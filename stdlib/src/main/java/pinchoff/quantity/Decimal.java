@@ -3,6 +3,7 @@ package pinchoff.quantity;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
+import java.util.function.ToDoubleFunction;
 
 /**
  * Doubles as the decimal numbers that their writers mean: the shortest decimal that reads back as
@@ -29,6 +30,21 @@ final class Decimal {
       }
     }
     return normal(exact.round(new MathContext(17, RoundingMode.HALF_EVEN)));
+  }
+
+  /**
+   * The decimal with the fewest digits that some reading takes for a value; the decimal itself, to
+   * 17 digits, if there is none.
+   */
+  static BigDecimal shortest(
+      BigDecimal decimal, ToDoubleFunction<BigDecimal> reading, double value) {
+    for (int digits = 15; digits < 17; digits++) {
+      BigDecimal rounded = decimal.round(new MathContext(digits, RoundingMode.HALF_EVEN));
+      if (reading.applyAsDouble(rounded) == value) {
+        return normal(rounded);
+      }
+    }
+    return normal(decimal.round(new MathContext(17, RoundingMode.HALF_EVEN)));
   }
 
   /** The shortest decimal as text; the platform's own differs between versions. */

@@ -58,8 +58,12 @@ public record Engineering(String number, Unit in) {
 
   /** Number and unit: {@code "650.0 mV"}, {@code "35.00 %"}; a pure number is the number alone. */
   public String text() {
-    String unit = unit();
-    return number + (unit.isEmpty() || unit.equals(DEGREE) ? "" : " ") + unit;
+    return number + (isClose() ? "" : " ") + unit();
+  }
+
+  /** True if nothing stands between number and unit: no unit, or the degree of an angle. */
+  boolean isClose() {
+    return unit().isEmpty() || unit().equals(DEGREE);
   }
 
   /**

@@ -319,7 +319,7 @@ public final class Quantity implements Comparable<Quantity>, Displayable {
    */
   public String asciiText() {
     Unit unit = Engineering.of(this, Engineering.DIGITS).in();
-    BigDecimal number = unit.isDecimal() ? unit.decimalFromSi(si) : Decimal.of(in(unit));
+    BigDecimal number = Decimal.shortest(unit.decimalFromSi(si), unit::toSi, si);
     if (unit.toSi(number) != si) {
       unit = CoherentUnits.of(dimension);
       number = unit.decimalFromSi(si);
@@ -353,7 +353,8 @@ public final class Quantity implements Comparable<Quantity>, Displayable {
   public MimeBundle display() {
     Engineering brief = Engineering.brief(this);
     String unit = brief.in().html();
-    String html = "<span>" + brief.number() + (unit.isEmpty() ? "" : "&nbsp;" + unit) + "</span>";
+    String space = brief.isClose() ? "" : "&nbsp;";
+    String html = "<span>" + brief.number() + space + unit + "</span>";
     return MimeBundle.builder(brief.text()).with(MimeBundle.HTML, html).build();
   }
 

@@ -77,7 +77,15 @@ class QuantityLawTest {
         "powers",
         RUNS,
         gen -> {
-          Quantity a = positive(gen, DimensionTest.any(gen));
+          Quantity a =
+              positive(
+                  gen,
+                  gen.pick(
+                      List.of(
+                          Dimension.VOLTAGE,
+                          Dimension.ROOT_VOLTAGE,
+                          Dimension.CAPACITANCE,
+                          Dimension.TRANSCONDUCTANCE_PARAMETER)));
           assertEquals(a, a.pow(1));
           assertEquals(a.times(a), a.pow(2));
           near.involution(q -> q.pow(-1), a);
@@ -153,7 +161,7 @@ class QuantityLawTest {
       Quantity result = operation.get();
       assertTrue(Double.isFinite(result.si()), result::toString);
     } catch (QuantityException refused) {
-      assertTrue(refused.getMessage().contains(" V"), refused::getMessage);
+      assertTrue(refused.getMessage().contains("V"), refused::getMessage);
     }
   }
 
