@@ -1,6 +1,7 @@
 package pinchoff.cells;
 
 import java.util.Optional;
+import pinchoff.derive.Derivation;
 import pinchoff.display.Displayable;
 import pinchoff.display.Host;
 import pinchoff.display.MimeBundle;
@@ -56,6 +57,23 @@ public final class Session {
    */
   public static String askHidden(String prompt) {
     return Host.current().ask(prompt, true);
+  }
+
+  /**
+   * Starts a derivation: formulas in trade notation, one to a line, worked out with units.
+   *
+   * <pre>
+   * derive("""
+   *     V_OV       = sqrt(2*I_REF/(k_n*W/L))    // square law, saturation
+   *     R_B [kohm] = (V_DD - V_TH - V_OV)/I_REF
+   *     V_OV &gt;= 100 mV                          // strong inversion
+   *     """).using(op.as("1"))
+   * </pre>
+   *
+   * @param text the formulas, see {@link Derivation}
+   */
+  public static Derivation derive(String text) {
+    return Derivation.of(text);
   }
 
   /**

@@ -36,4 +36,15 @@ final class Check {
     }
     return value;
   }
+
+  /** The value of a V_SB of an n device or a V_BS of a p device. */
+  static Quantity sourceBody(Transistor transistor, Known given) {
+    boolean n = transistor.polarity() == Polarity.N;
+    if (given.kind() != (n ? Known.Kind.VSB : Known.Kind.VBS)) {
+      throw new DeviceException(
+          "%s for curves of %s: expected %s"
+              .formatted(given, transistor.device().name(), n ? "vsb" : "vbs"));
+    }
+    return given.value();
+  }
 }

@@ -1,5 +1,8 @@
 package pinchoff.device;
 
+import pinchoff.display.Displayable;
+import pinchoff.display.MimeBundle;
+import pinchoff.page.Page;
 import pinchoff.quantity.Quantity;
 
 /**
@@ -11,7 +14,8 @@ import pinchoff.quantity.Quantity;
  * @param source where all of it comes from
  */
 public record Device(
-    DeviceParameters parameters, GeometryRules rules, Ratings ratings, Source source) {
+    DeviceParameters parameters, GeometryRules rules, Ratings ratings, Source source)
+    implements Displayable {
 
   /** A device without rules and ratings whose parameters stand in a cell. */
   public static Device of(DeviceParameters parameters) {
@@ -48,5 +52,15 @@ public record Device(
   @Override
   public String toString() {
     return parameters.polarity().letter() + " device " + name();
+  }
+
+  /** The parameters as a sheet. */
+  public Page page() {
+    return DeviceSheet.of(this);
+  }
+
+  @Override
+  public MimeBundle display() {
+    return page().display();
   }
 }

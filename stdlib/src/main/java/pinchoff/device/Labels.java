@@ -36,6 +36,11 @@ record Labels(
           "V_SD,sat",
           "p device: V_SG, V_SD, V_BS and I_D (out of the drain) are positive in normal operation.");
 
+  /** What V_OV is the difference of. */
+  String overdrive() {
+    return gateSource + " − " + (threshold.startsWith("−") ? "(" + threshold + ")" : threshold);
+  }
+
   static Labels of(Polarity polarity) {
     return polarity == Polarity.N ? OF_N : OF_P;
   }

@@ -1,6 +1,10 @@
 package pinchoff.device;
 
 import java.util.List;
+import pinchoff.display.Displayable;
+import pinchoff.display.MimeBundle;
+import pinchoff.formula.NamedValues;
+import pinchoff.page.Page;
 import pinchoff.quantity.Dimension;
 import pinchoff.quantity.Quantity;
 
@@ -12,7 +16,7 @@ import pinchoff.quantity.Quantity;
  * named source and drain have changed roles, {@link #isSwapped} is true and {@link #drainCurrent}
  * is still positive: it flows from the acting drain to the acting source.
  */
-public final class OperatingPoint {
+public final class OperatingPoint implements Displayable {
   private final Transistor transistor;
   private final Bias bias;
   private final Channel channel;
@@ -207,9 +211,7 @@ public final class OperatingPoint {
     Edge toThreshold =
         new Edge(
             region() == Region.CUTOFF ? "until it conducts" : "to cutoff",
-            region() == Region.CUTOFF
-                ? l.threshold() + " − " + l.gateSource()
-                : l.gateSource() + " − (" + l.threshold() + ")",
+            region() == Region.CUTOFF ? l.threshold() + " − " + l.gateSource() : l.overdrive(),
             volts(region() == Region.CUTOFF ? -vov() : vov()));
     Edge toSaturation =
         region() == Region.TRIODE
@@ -235,6 +237,26 @@ public final class OperatingPoint {
   /** What must be said beside the figures. */
   public List<Caution> cautions() {
     return Cautions.of(this);
+  }
+
+  /**
+   * The figures under names with a suffix, for formulas: {@code as("1")} gives V_GS1, V_TH1, V_OV1,
+   * I_D1, g_m1, W1, L1 and so on; V_SG1, V_SD1, V_BS1 for a p device, whose V_TH1 is −V_TH.
+   *
+   * @param suffix letters and digits, for example {@code "1"}
+   */
+  public NamedValues as(String suffix) {
+    return NamedFigures.of(this, suffix);
+  }
+
+  /** The bias sheet: region with margins, figures, cautions, and how far the model applies here. */
+  public Page page() {
+    return BiasSheet.of(this);
+  }
+
+  @Override
+  public MimeBundle display() {
+    return page().display();
   }
 
   @Override

@@ -1,5 +1,6 @@
 package pinchoff.device;
 
+import java.util.List;
 import pinchoff.quantity.Dimension;
 import pinchoff.quantity.Quantity;
 import pinchoff.quantity.Temperature;
@@ -133,6 +134,31 @@ public record Transistor(
    */
   public OperatingPoint at(Known... terms) {
     return OperatingPoint.of(this, Bias.of(device, terms));
+  }
+
+  /**
+   * I_D against V_DS for these V_GS, with the edge of saturation.
+   *
+   * @param drives V_GS of each curve; V_SG for a p device
+   */
+  public OutputCurves outputCurves(Quantity... drives) {
+    return OutputCurves.of(this, List.of(drives));
+  }
+
+  /**
+   * I_D and √I_D against V_GS.
+   *
+   * @param drain {@code vds} for n, {@code vsd} for p
+   * @throws DeviceException if it is anything else
+   */
+  public TransferCurve transferCurve(Known drain) {
+    boolean n = polarity() == Polarity.N;
+    if (drain.kind() != (n ? Known.Kind.VDS : Known.Kind.VSD)) {
+      throw new DeviceException(
+          "%s for a transfer curve of %s: expected %s"
+              .formatted(drain, device.name(), n ? "vds" : "vsd"));
+    }
+    return TransferCurve.of(this, drain.value());
   }
 
   @Override

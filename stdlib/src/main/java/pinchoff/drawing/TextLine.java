@@ -25,6 +25,9 @@ public record TextLine(List<Span> spans) {
       Pattern.compile(
           "(?<![\\p{L}\\p{N}_])(?:\\d{0,3}√?\\p{L}['′]?_[\\p{L}\\p{N}]+(?:,[\\p{L}][\\p{L}\\p{N}]*)*)(?:/\\p{L}_[\\p{L}\\p{N}]+)?(?![\\p{L}\\p{N}_])");
 
+  /** Sums of widths differ by less than this. */
+  private static final double ROUNDING = 1e-6;
+
   /** Where a run stands. */
   public enum Level {
     /** On the line, full size. */
@@ -142,7 +145,7 @@ public record TextLine(List<Span> spans) {
 
   /** This line, or as much of it as fits, with an ellipsis at its end. */
   public TextLine within(double width, double size) {
-    if (width(size) <= width) {
+    if (width(size) <= width + ROUNDING) {
       return this;
     }
     double room = width / size - Typeface.advance('…');
