@@ -175,8 +175,8 @@ final class RunCommand implements Callable<Integer> {
           .println(
               Printable.line(
                   file
-                      + ": cell "
-                      + cell.place()
+                      + ": "
+                      + cell.label()
                       + ": "
                       + cell.error().map(e -> e.name() + ": " + e.value()).orElse("failed")));
     }

@@ -29,7 +29,7 @@ final class RunPrinter implements RunListener, AutoCloseable {
   public void cellEnded(CellRun cell, List<Output> outputs) {
     if (showsResults && !outputs.isEmpty()) {
       clearLine();
-      streams.out().println("cell " + cell.place() + ":");
+      streams.out().println(cell.label() + ":");
       outputs.forEach(this::show);
     } else if (!showsResults && cell.ending().isFinding()) {
       clearLine();
@@ -49,7 +49,8 @@ final class RunPrinter implements RunListener, AutoCloseable {
     } else if (output instanceof Output.Rich rich) {
       print(streams.out(), rich.plainText().orElse("(no plain text)"));
     } else if (output instanceof Output.Failure failure) {
-      print(streams.err(), String.join("\n", failure.traceback()));
+      PrintStream where = showsResults ? streams.out() : streams.err();
+      print(where, String.join("\n", failure.traceback()));
     }
   }
 

@@ -44,6 +44,13 @@ public record CellRun(
     }
   }
 
+  /** What a reader knows the cell by: its number in brackets if it ran, else its place. */
+  public String label() {
+    return executionCount
+        .map(number -> "cell [" + number + "]")
+        .orElse("the cell at place " + place);
+  }
+
   static CellRun of(int place, String id, Ending ending) {
     return new CellRun(place, id, ending, Optional.empty(), Optional.empty());
   }
