@@ -7,7 +7,7 @@ import threading
 STEPS = [
     ('System.out.println("hello, world");', "hello, world"),
     ('throw new IllegalStateException("the bias ran away");', "the bias ran away"),
-    ("mV(650).times(2)", "1.300 V"),
+    ("mV(650).times(2)", "1.3 V"),
     ("int five = 5;", None),
     ("five + 1", "6"),
 ]

@@ -20,11 +20,23 @@ final class HtmlEntries {
     } else if (entry instanceof Entry.Judgement judgement) {
       return html(judgement.verdict());
     } else if (entry instanceof Entry.Formula formula) {
-      return RelationMathMl.inline(formula.relation());
+      return formula(formula.relation());
     } else if (entry instanceof Entry.Run run) {
       return html(run.phrase());
     }
     return Figure.of(entry).map(Figure::html).orElse("");
+  }
+
+  /**
+   * A formula in a box as wide as it will be: front ends that set formulas by themselves break
+   * lines at the width that they find.
+   */
+  private static String formula(Relation relation) {
+    return String.format(
+        Locale.ROOT,
+        "<span class=\"pinchoff-formula\" style=\"min-width:%.1fem\">%s</span>",
+        RelationWidth.of(relation),
+        RelationMathMl.inline(relation));
   }
 
   static String html(Symbol symbol) {

@@ -140,10 +140,10 @@ final class ErrorReport {
     return method.startsWith("do_it$") || method.startsWith("lambda$") ? "" : " in " + method;
   }
 
-  /** Frames of the kernel, the compiler's engine and reflection say nothing about the cell. */
+  /** Frames of Pinchoff itself, the compiler's engine and reflection say nothing about the cell. */
   private static boolean isOurs(StackTraceElement frame) {
     String type = frame.getClassName();
-    return type.startsWith("pinchoff.kernel.")
+    return type.startsWith("pinchoff.")
         || type.startsWith("jdk.internal.reflect.")
         || type.startsWith("java.lang.reflect.")
         || (type.equals("java.lang.Thread") && frame.getMethodName().equals("run"))

@@ -16,6 +16,9 @@ import pinchoff.display.MimeBundle;
  * back what was there. One at a time in a process.
  */
 public final class JShellEvaluator implements CellEvaluator {
+  /** All that is known, also of several methods of one name. */
+  private static final int FULL = 1;
+
   private final OutputRouter router = new OutputRouter();
   private final SnippetCompiler compiler;
   private final JavaParser parser = new JavaParser(SnippetCompiler.languageLevel());
@@ -38,7 +41,11 @@ public final class JShellEvaluator implements CellEvaluator {
     inspector = new Inspector(compiler, library);
     log = options.log();
     report = new ErrorReport(compiler.frames());
-    host = new SessionHost(compiler.variables(), options.premises());
+    host =
+        new SessionHost(
+            compiler.variables(),
+            options.premises(),
+            name -> inspector.inspect(name, name.length(), FULL));
     previousHost = Host.install(host);
     router.install();
   }

@@ -4,18 +4,32 @@ import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Function;
+import java.util.regex.Pattern;
 import pinchoff.display.Host;
 import pinchoff.display.MimeBundle;
 
 /** What the code of cells may ask of their session. */
 final class SessionHost implements Host {
+  private static final Pattern NAME = Pattern.compile("[\\p{L}_$][\\p{L}\\p{N}_$.]{0,199}");
+
   private final SessionVariables variables;
   private final Map<String, String> premises;
+  private final Function<String, Optional<MimeBundle>> help;
   private final Map<String, String> technologies =
       Collections.synchronizedMap(new LinkedHashMap<>());
 
-  SessionHost(SessionVariables variables, Map<String, String> premises) {
+  /**
+   * The host of a session.
+   *
+   * @param help what is known of a name
+   */
+  SessionHost(
+      SessionVariables variables,
+      Map<String, String> premises,
+      Function<String, Optional<MimeBundle>> help) {
     this.variables = variables;
+    this.help = help;
     this.premises = Map.copyOf(premises);
   }
 
@@ -29,6 +43,11 @@ final class SessionHost implements Host {
   @Override
   public Optional<Object> lookup(String name) {
     return variables.value(name);
+  }
+
+  @Override
+  public Optional<MimeBundle> help(String name) {
+    return NAME.matcher(name).matches() ? help.apply(name) : Optional.empty();
   }
 
   @Override
