@@ -39,12 +39,10 @@ final class Ledger {
       page.table(inputs());
     }
     page.table(steps(page));
-    for (Issue issue : derivation.issues()) {
-      page.caution(
-          "line {}, column {}: {}",
-          (long) issue.span().start().line(),
-          (long) issue.span().start().column(),
-          issue.sentence());
+    List<Issue> faults =
+        derivation.issues().stream().filter(i -> !i.message().startsWith(Run.WAITS)).toList();
+    if (!faults.isEmpty()) {
+      page.listing(Issue.renderAll(faults, derivation.formulas().source()));
     }
     return page.build();
   }
@@ -124,7 +122,9 @@ final class Ledger {
 
   private Entry numbers(Outcome outcome) {
     if (!outcome.issues().isEmpty()) {
-      return Entry.of(Phrase.of("{}", Verdict.fails().saying(outcome.issues().get(0).sentence())));
+      boolean waits = outcome.issues().get(0).message().startsWith(Run.WAITS);
+      String words = waits ? outcome.issues().get(0).message() : "see below";
+      return Entry.of(Phrase.of("{}", Verdict.unknown().saying(words)));
     }
     Statement statement = outcome.statement();
     if (statement instanceof Statement.Definition d) {
@@ -141,7 +141,7 @@ final class Ledger {
     }
     Statement.Check check = (Statement.Check) statement;
     return Entry.of(
-        Phrase.of("{}: {}", comparison(check, values(check)), outcome.verdict().orElseThrow()));
+        Phrase.of("{} {}", comparison(check, values(check)), outcome.verdict().orElseThrow()));
   }
 
   private static Entry solved(Outcome outcome) {

@@ -13,6 +13,9 @@ import pinchoff.source.Issue;
 
 /** One evaluation of a plan. */
 final class Run {
+  /** How the message of a step begins that has nothing wrong itself. */
+  static final String WAITS = "not evaluated";
+
   private final Plan plan;
   private final Dimensions dimensions;
   private final double[] slots;
@@ -70,8 +73,7 @@ final class Run {
   }
 
   private static Issue waits(Statement statement, String missing) {
-    return Issue.error(
-        statement.span(), "not evaluated: it needs " + missing + ", which has no value");
+    return Issue.error(statement.span(), WAITS + ": it needs " + missing + ", which has no value");
   }
 
   private Outcome computed(Planned.Computed step) {

@@ -9,5 +9,6 @@ public sealed interface Block
         PictureBlock,
         VerdictBlock,
         CautionBlock,
+        Listing,
         TrustLine,
         Fold {}

@@ -67,6 +67,8 @@ final class HtmlPage {
       line(
           "div class=\"pinchoff-caution\" role=\"note\"",
           "<b>Caution:</b> " + HtmlEntries.html(caution.text()));
+    } else if (block instanceof Listing listing) {
+      line("pre class=\"pinchoff-listing\"", Escape.html(listing.text()));
     } else if (block instanceof TrustLine trust) {
       line(
           "p class=\"pinchoff-trust\"",

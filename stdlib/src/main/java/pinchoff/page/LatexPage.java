@@ -51,6 +51,11 @@ final class LatexPage {
               + Escape.latex(verdict.verdict().statement()));
     } else if (block instanceof CautionBlock caution) {
       paragraph("\\textbf{Caution:} " + LatexEntries.latex(caution.text()));
+    } else if (block instanceof Listing listing) {
+      listing
+          .text()
+          .lines()
+          .forEach(l -> paragraph("\\texttt{" + Escape.latex(l).replace(" ", "~") + "}"));
     } else if (block instanceof TrustLine trust) {
       String sign = LatexEntries.sign(trust.standing());
       paragraph(sign + " Trust: " + LatexEntries.latex(trust.text()));

@@ -141,6 +141,11 @@ public record Page(Phrase title, List<Block> blocks, ValuesSheet values) impleme
       return block(new CautionBlock(Phrase.of(template, arguments)));
     }
 
+    /** Lines of text as they are, in letters of equal width. */
+    public Builder listing(String text) {
+      return block(new Listing(text));
+    }
+
     /** The trust line of what stands above it. */
     public Builder trust(Standing standing, String template, Object... arguments) {
       return block(new TrustLine(standing, Phrase.of(template, arguments)));

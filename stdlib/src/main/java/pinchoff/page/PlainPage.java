@@ -64,6 +64,8 @@ final class PlainPage {
       return hanging(PlainEntries.line(verdict), verdict.verdict().standing().sign());
     } else if (block instanceof CautionBlock caution) {
       return hanging("Caution: " + caution.text().text(), "!");
+    } else if (block instanceof Listing listing) {
+      return listing.text().lines().map(Escape::visible).toList();
     } else if (block instanceof TrustLine trust) {
       return hanging("Trust: " + trust.text().text(), trust.standing().sign());
     } else if (block instanceof Fold fold) {

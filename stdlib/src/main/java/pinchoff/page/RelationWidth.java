@@ -9,10 +9,13 @@ final class RelationWidth {
   private static final double SIGN = 1.25;
   private static final double MOST = 44;
 
+  /** Some front ends set formulas in larger letters than text. */
+  private static final double LARGER = 1.3;
+
   private RelationWidth() {}
 
   static double of(Relation relation) {
-    return Math.min(MOST, 0.4 + width(relation));
+    return Math.min(MOST, 0.4 + LARGER * width(relation));
   }
 
   private static double width(Relation r) {
