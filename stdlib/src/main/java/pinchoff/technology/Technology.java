@@ -1,9 +1,5 @@
 package pinchoff.technology;
 
-import java.io.IOException;
-import java.io.InputStream;
-import java.io.UncheckedIOException;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.Collection;
 import java.util.Collections;
@@ -41,7 +37,6 @@ import pinchoff.source.Suggestions;
  */
 public final class Technology implements Displayable {
   private static final int SHORT_HASH = 12;
-  private static final String SCHEMA = "technology.schema.json";
 
   private final String file;
   private final Document document;
@@ -121,14 +116,7 @@ public final class Technology implements Displayable {
 
   /** The JSON Schema (2020-12) of technology files, for editors that check while one writes. */
   public static String schema() {
-    try (InputStream in = Technology.class.getResourceAsStream(SCHEMA)) {
-      if (in == null) {
-        throw new IllegalStateException("the library lacks its resource " + SCHEMA);
-      }
-      return new String(in.readAllBytes(), StandardCharsets.UTF_8);
-    } catch (IOException unreadable) {
-      throw new UncheckedIOException(unreadable);
-    }
+    return SchemaText.of();
   }
 
   /** The name of the process. */
