@@ -67,9 +67,30 @@ class InterruptTest {
 
   @Test
   void aBlockedSocketIsLeftBehindAndTheUserIsTold() throws InterruptedException {
-    CellScript.Ran ran = interrupted("{ started(); new java.net.ServerSocket(0).accept(); }");
+    CellScript.Running running =
+        session.start("{ var server = new java.net.ServerSocket(0); started(); server.accept(); }");
+    running.output().await(o -> o.out().contains("started"));
+    awaitFrame("java.net.ServerSocket", "accept");
+    session.evaluator.interrupt();
+    CellScript.Ran ran = running.end().failsWith("Interrupted", "");
+    session.cell("kept").shows("42");
     assertTrue(ran.failure().message().contains("left behind"), ran.failure().message());
     session.cell("kept + 1").shows("43");
+  }
+
+  /** Waits until a thread of this process is in a method. */
+  private static void awaitFrame(String type, String method) throws InterruptedException {
+    for (int i = 0; i < 1000; i++) {
+      boolean there =
+          Thread.getAllStackTraces().values().stream()
+              .flatMap(java.util.Arrays::stream)
+              .anyMatch(f -> f.getClassName().equals(type) && f.getMethodName().equals(method));
+      if (there) {
+        return;
+      }
+      Thread.sleep(10);
+    }
+    throw new AssertionError("no thread came to " + type + "." + method);
   }
 
   @Test
