@@ -42,6 +42,7 @@ class FaultTest {
             "long[][] all = new long[100_000][]; for (int i = 0; ; i++) all[i % 100_000] = new long[100_000_000];")
         .failsWith("OutOfMemoryError", "");
     session.cell("int[] big = new int[Integer.MAX_VALUE];").failsWith("OutOfMemoryError", "");
+    session.cell("all = null;").showsNothing(); // the memory is needed by the tests after this one
   }
 
   @ParameterizedTest
