@@ -87,6 +87,8 @@ public final class Derivation implements Displayable, NamedValues {
             e -> {
               if (e instanceof Expression.Named named) {
                 used.add(named.written());
+              } else if (e instanceof Expression.Amount amount) {
+                used.addAll(amount.joined()); // a unit that may have been meant as a name
               }
             });
       }

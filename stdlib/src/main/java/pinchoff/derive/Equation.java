@@ -34,6 +34,9 @@ record Equation(
   /** How far beyond the largest known quantity of its kind an unknown is sought. */
   private static final double REACH = 10;
 
+  /** Where to seek an unknown that nothing is known of, in SI units. */
+  private static final double ANY = 1e9;
+
   /**
    * A root and whether the conditions hold there.
    *
@@ -52,10 +55,13 @@ record Equation(
   Found solve(double[] slots, Dimensions dimensions) {
     double reach = 0;
     for (int relative : relatives) {
-      reach = Math.max(reach, Math.abs(slots[relative]));
+      if (!Double.isNaN(slots[relative])) {
+        reach = Math.max(reach, Math.abs(slots[relative]));
+      }
     }
-    double low = bound(slots, true).orElse(-REACH * reach);
-    double high = bound(slots, false).orElse(REACH * reach);
+    double most = reach > 0 ? REACH * reach : ANY;
+    double low = bound(slots, true).orElse(-most);
+    double high = bound(slots, false).orElse(most);
     if (!(low < high)) {
       return new Found(List.of(), low, high, Optional.of(noRange(low, high)));
     }
@@ -67,6 +73,8 @@ record Equation(
               work[slot] = x;
               return residual.evaluate(work, results);
             },
+            Math.min(low, -most),
+            Math.max(high, most),
             low,
             high);
     List<Root> roots = new ArrayList<>();
@@ -78,14 +86,13 @@ record Equation(
   }
 
   private Issue noRange(double low, double high) {
-    String name = statement.target().written();
     return Issue.error(
         statement.target().span(),
-        low == high && low == 0
-            ? "no range to seek %s in: nothing else here is %s; add conditions, for example \", %s > …, %s < …\""
-                .formatted(name, dimension.description(), name, name)
-            : "the conditions leave no range for %s: %s to %s"
-                .formatted(name, Quantity.ofSi(low, dimension), Quantity.ofSi(high, dimension)));
+        "the conditions leave no range for %s: %s to %s"
+            .formatted(
+                statement.target().written(),
+                Quantity.ofSi(low, dimension),
+                Quantity.ofSi(high, dimension)));
   }
 
   private Optional<String> broken(double[] slots, Dimensions dimensions) {

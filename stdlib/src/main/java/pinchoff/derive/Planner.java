@@ -9,6 +9,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Collectors;
 import pinchoff.formula.Code;
 import pinchoff.formula.Dimensions;
 import pinchoff.formula.Expression;
@@ -40,6 +41,8 @@ final class Planner {
           Dimension.PER_VOLTAGE,
           Dimension.INDUCTANCE,
           Dimension.CHARGE);
+
+  private static final int MOST_NAMED = 3;
 
   private final Map<String, Integer> slots = new LinkedHashMap<>();
   private final Map<String, Dimension> dimensions = new LinkedHashMap<>();
@@ -263,7 +266,12 @@ final class Planner {
                 : "%s could be %s; give its unit in brackets: %s [V] such that …"
                     .formatted(
                         name,
-                        String.join(" or ", fitting.stream().map(Dimension::description).toList()),
+                        fitting.stream()
+                            .limit(MOST_NAMED)
+                            .map(Dimension::description)
+                            .collect(
+                                Collectors.joining(
+                                    " or ", "", fitting.size() > MOST_NAMED ? " or other" : "")),
                         name)));
   }
 }

@@ -11,28 +11,44 @@ import pinchoff.numeric.Roots;
 
 /**
  * The roots of a function in an interval, found from samples: a change of sign between neighbours,
- * or a place where the function touches zero. Roots closer together than a thousandth of the
- * interval may be taken for none or one. A change of sign at a pole is no root.
+ * or a place where the function touches zero. Samples are evenly spaced over the whole and again
+ * over the part that matters most, and closer and closer towards zero. Roots closer together than
+ * these may be taken for none or one. A change of sign at a pole is no root.
  */
 final class RootScan {
   private static final int SAMPLES = 2000;
-  private static final int DECADES = 9;
-  private static final int PER_DECADE = 20;
+  private static final int DECADES = 27;
+  private static final int PER_DECADE = 60;
   private static final double SMALL = 1e-9;
+
+  /** Zero, compared with what the function is at the neighbouring samples. */
+  private static final double TOUCHING = 1e-6;
 
   private final DoubleUnaryOperator function;
   private final double low;
   private final double high;
+  private final double innerLow;
+  private final double innerHigh;
   private final List<Double> roots = new ArrayList<>();
 
-  private RootScan(DoubleUnaryOperator function, double low, double high) {
+  private RootScan(
+      DoubleUnaryOperator function, double low, double high, double innerLow, double innerHigh) {
     this.function = function;
     this.low = low;
     this.high = high;
+    this.innerLow = innerLow;
+    this.innerHigh = innerHigh;
   }
 
-  static List<Double> of(DoubleUnaryOperator function, double low, double high) {
-    RootScan scan = new RootScan(function, low, high);
+  /**
+   * The roots in an interval, in order.
+   *
+   * @param innerLow lower end of the part that matters most
+   * @param innerHigh upper end of that part
+   */
+  static List<Double> of(
+      DoubleUnaryOperator function, double low, double high, double innerLow, double innerHigh) {
+    RootScan scan = new RootScan(function, low, high, innerLow, innerHigh);
     scan.run();
     return scan.roots;
   }
@@ -40,11 +56,9 @@ final class RootScan {
   private void run() {
     double[] x = places().stream().mapToDouble(Double::doubleValue).toArray();
     double[] y = new double[x.length];
-    double scale = 0;
     for (int i = 0; i < x.length; i++) {
       Host.current().checkpoint();
       y[i] = function.applyAsDouble(x[i]);
-      scale = Double.isFinite(y[i]) ? Math.max(scale, Math.abs(y[i])) : scale;
     }
     for (int i = 0; i < x.length; i++) {
       if (y[i] == 0) {
@@ -52,7 +66,7 @@ final class RootScan {
       } else if (i > 0 && y[i - 1] * Math.signum(y[i]) < 0) {
         change(x[i - 1], x[i], Math.min(Math.abs(y[i - 1]), Math.abs(y[i])));
       } else if (i > 0 && i + 1 < x.length) {
-        touch(x[i - 1], x[i + 1], y[i - 1], y[i], y[i + 1], scale);
+        touch(x[i - 1], x[i + 1], y[i - 1], y[i], y[i + 1]);
       }
     }
   }
@@ -61,6 +75,7 @@ final class RootScan {
     SortedSet<Double> places = new TreeSet<>();
     for (int i = 0; i <= SAMPLES; i++) {
       places.add(low + (high - low) * i / SAMPLES);
+      places.add(innerLow + (innerHigh - innerLow) * i / SAMPLES);
     }
     double largest = Math.max(Math.abs(low), Math.abs(high));
     for (int i = 0; i <= DECADES * PER_DECADE; i++) {
@@ -86,7 +101,7 @@ final class RootScan {
   }
 
   /** Where the function comes closest to zero without passing it. */
-  private void touch(double a, double b, double ya, double ym, double yb, double scale) {
+  private void touch(double a, double b, double ya, double ym, double yb) {
     double sign = Math.signum(ym);
     if (!(sign * ym < sign * ya && sign * ym <= sign * yb)) {
       return;
@@ -107,14 +122,14 @@ final class RootScan {
     if (sign * there < 0) {
       change(a, best, Math.abs(there));
       change(best, b, Math.abs(there));
-    } else if (Math.abs(there) <= SMALL * SMALL * scale) {
+    } else if (Math.abs(there) <= TOUCHING * Math.min(Math.abs(ya), Math.abs(yb))) {
       add(best);
     }
   }
 
   private void add(double root) {
     double last = roots.isEmpty() ? Double.NaN : roots.get(roots.size() - 1);
-    if (!(Math.abs(root - last) <= SMALL * (high - low))) {
+    if (!(Math.abs(root - last) <= SMALL * Math.max(Math.abs(root), Math.abs(last)))) {
       roots.add(root);
     }
   }

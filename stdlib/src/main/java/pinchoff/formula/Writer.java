@@ -12,6 +12,10 @@ import pinchoff.page.Relation.Sign;
 /** Writes what was read, with no more parentheses than needed. */
 final class Writer {
   private static final int SIGN_RANK = 3;
+
+  /** A power after a unit would be one of the unit. */
+  private static final int UNIT_RANK = 4;
+
   private static final int HIGHEST = 5;
 
   private Writer() {}
@@ -73,6 +77,9 @@ final class Writer {
   private static int rank(Expression e) {
     if (e instanceof Binary b) {
       return b.operator().rank();
+    }
+    if (e instanceof Amount amount && amount.written().indexOf(' ') > 0) {
+      return UNIT_RANK;
     }
     return e instanceof Negative ? SIGN_RANK : HIGHEST;
   }

@@ -3,6 +3,7 @@ package pinchoff.kernel.eval;
 import java.util.Optional;
 import java.util.concurrent.ForkJoinPool;
 import java.util.concurrent.ForkJoinWorkerThread;
+import java.util.concurrent.TimeUnit;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -12,6 +13,7 @@ import org.jspecify.annotations.Nullable;
 final class CellScope {
   private static final InheritableThreadLocal<@Nullable CellScope> OF_THREAD =
       new InheritableThreadLocal<>();
+  private static final long SETTLE_MILLIS = 500;
   private static volatile @Nullable CellScope latest;
 
   private final CellText text;
@@ -85,6 +87,32 @@ final class CellScope {
   void stop() {
     stopped = true;
     CellGuard.stop(this);
+  }
+
+  /**
+   * After a stop, takes what the cell left in the common pool out of it: workers count as working
+   * for the latest cell, so a piece of a parallel stream that began later would never end.
+   */
+  void settle() {
+    ForkJoinPool pool = ForkJoinPool.commonPool();
+    if (!stopped || pool.isQuiescent()) {
+      return;
+    }
+    Thread sweeper =
+        new Thread(
+            group,
+            () -> {
+              enter();
+              pool.awaitQuiescence(SETTLE_MILLIS, TimeUnit.MILLISECONDS);
+            },
+            "end of " + text.label());
+    sweeper.setDaemon(true);
+    sweeper.start();
+    try {
+      sweeper.join(2 * SETTLE_MILLIS);
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
+    }
   }
 
   boolean hasThreads() {

@@ -88,6 +88,7 @@ public final class JShellEvaluator implements CellEvaluator {
         return new CellRun(compiler, parser, scope, cellThread).outcome();
       } finally {
         thread = null;
+        scope.settle();
       }
     } finally {
       running.unlock();
