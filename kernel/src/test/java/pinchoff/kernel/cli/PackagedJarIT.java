@@ -189,7 +189,7 @@ class PackagedJarIT {
         refusal("bad limit", "--cell-limit", "run", "--cell-limit", "-1", "first-bias.ipynb"),
         refusal("missing connection file", "there is no such file", "kernel", "nothing.json"),
         refusal("broken connection file", "broken.ipynb", "kernel", "broken.ipynb"),
-        refusal("bad name", "--name", "register", "--prefix", ".", "--name", "../evil"));
+        refusal("bad name", "cannot be used", "register", "--prefix", ".", "--name", "../evil"));
   }
 
   private static Arguments refusal(String what, String part, String... arguments) {
@@ -238,14 +238,21 @@ class PackagedJarIT {
 
   @Test
   void aPortInUseIsOneSentence() throws Exception {
-    try (ServerSocket taken = new ServerSocket(0, 1, InetAddress.getLoopbackAddress())) {
+    InetAddress here = InetAddress.getLoopbackAddress();
+    List<Integer> free = new ArrayList<>();
+    for (int i = 0; i < 4; i++) {
+      try (ServerSocket other = new ServerSocket(0, 1, here)) {
+        free.add(other.getLocalPort());
+      }
+    }
+    try (ServerSocket taken = new ServerSocket(0, 1, here)) {
       int port = taken.getLocalPort();
       Files.writeString(
           folder.resolve("connection.json"),
-          ("{\"transport\": \"tcp\", \"ip\": \"127.0.0.1\", \"shell_port\": %d, \"iopub_port\": 0,"
-                  + " \"stdin_port\": 0, \"control_port\": 0, \"hb_port\": 0, \"key\": \"k\","
+          ("{\"transport\": \"tcp\", \"ip\": \"127.0.0.1\", \"shell_port\": %d, \"iopub_port\": %d,"
+                  + " \"stdin_port\": %d, \"control_port\": %d, \"hb_port\": %d, \"key\": \"k\","
                   + " \"signature_scheme\": \"hmac-sha256\"}")
-              .formatted(port));
+              .formatted(port, free.get(0), free.get(1), free.get(2), free.get(3)));
       Ended ended = pinchoff("kernel", "connection.json");
       assertEquals(2, ended.code(), ended::err);
       assertTrue(ended.err().contains(String.valueOf(port)), ended::err);
