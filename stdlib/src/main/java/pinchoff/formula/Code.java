@@ -58,16 +58,26 @@ public final class Code {
    * @return the value; NaN or infinite where {@link #fault} says why
    */
   public double evaluate(double[] inputs, double[] results) {
-    for (int i = 0; i < ops.length; i++) {
+    int last = ops.length - 1;
+    double value = 0;
+    for (int i = 0; i <= last; i++) {
       int l = left[i];
-      results[i] =
+      // the usual operations first, without a second dispatch
+      value =
           switch (ops[i]) {
             case CONSTANT -> constants[i];
             case INPUT -> inputs[l];
+            case PLUS -> results[l] + results[right[i]];
+            case MINUS -> results[l] - results[right[i]];
+            case TIMES -> results[l] * results[right[i]];
+            case OVER -> results[l] / results[right[i]];
+            case SQUARE -> results[l] * results[l];
+            case SQRT -> Math.sqrt(results[l]);
             default -> ops[i].value(results[l], results[right[i]]);
           };
+      results[i] = value;
     }
-    return results[ops.length - 1];
+    return value;
   }
 
   /** True if every operation had a finite result; to be asked after {@link #evaluate}. */
