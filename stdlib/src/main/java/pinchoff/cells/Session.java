@@ -1,11 +1,17 @@
 package pinchoff.cells;
 
 import java.util.Optional;
+import pinchoff.claims.Claim;
+import pinchoff.claims.Premise;
+import pinchoff.claims.Provenance;
+import pinchoff.claims.Spec;
 import pinchoff.derive.Derivation;
 import pinchoff.display.Displayable;
 import pinchoff.display.Host;
 import pinchoff.display.MimeBundle;
+import pinchoff.page.Page;
 import pinchoff.page.Progress;
+import pinchoff.quantity.Quantity;
 
 /** What a cell can ask of the notebook that it runs in. All of it is preloaded in a session. */
 public final class Session {
@@ -74,6 +80,40 @@ public final class Session {
    */
   public static Derivation derive(String text) {
     return Derivation.of(text);
+  }
+
+  /**
+   * Names an input of the notebook, so that it can be set from outside when the notebook is run
+   * again.
+   *
+   * @param name its name, which formulas can use
+   * @param standard its usual value
+   */
+  public static Premise premise(String name, Quantity standard) {
+    return Premise.of(name, standard);
+  }
+
+  /** Names a result that a rerun must reproduce. */
+  public static Claim claim(String name, Quantity value) {
+    return Claim.of(name, value);
+  }
+
+  /**
+   * Names a result that has limits: {@code spec("I_D of M1", i).min(uA(18)).typ(uA(20))
+   * .max(uA(22))}.
+   */
+  public static Spec spec(String name, Quantity value) {
+    return Spec.of(name, value);
+  }
+
+  /** Shows several specs as one table. */
+  public static Page specs(Spec... specs) {
+    return Spec.table(specs);
+  }
+
+  /** What the results rest on: versions, technology files with their hashes, premises. */
+  public static Provenance provenance() {
+    return Provenance.current();
   }
 
   /**

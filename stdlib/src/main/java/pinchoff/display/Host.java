@@ -1,5 +1,6 @@
 package pinchoff.display;
 
+import java.util.Map;
 import java.util.Optional;
 
 /**
@@ -49,6 +50,11 @@ public interface Host {
    */
   default Optional<String> premise(String name) {
     return Optional.empty();
+  }
+
+  /** The technology files that have been read: name to hash of the content, in order. */
+  default Map<String, String> technologies() {
+    return Map.of();
   }
 
   /** Shows a result at once, beside whatever value the cell ends with. */

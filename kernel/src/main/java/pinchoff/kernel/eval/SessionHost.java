@@ -34,7 +34,8 @@ final class SessionHost implements Host {
   }
 
   /** The technology files that cells have read: name to hash of the content. */
-  Map<String, String> technologies() {
+  @Override
+  public Map<String, String> technologies() {
     synchronized (technologies) {
       return Collections.unmodifiableMap(new LinkedHashMap<>(technologies));
     }
