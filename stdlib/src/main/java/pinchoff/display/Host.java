@@ -43,6 +43,11 @@ public interface Host {
     return Optional.empty();
   }
 
+  /** The names for which {@link #premise} has been asked, in order, separated by blanks. */
+  default String premisesRead() {
+    return "";
+  }
+
   /**
    * A value given from outside for a premise, as text.
    *

@@ -2,6 +2,7 @@ package pinchoff.kernel.cli;
 
 import java.nio.file.Path;
 import java.util.Locale;
+import java.util.Map;
 import java.util.concurrent.Callable;
 import java.util.function.Consumer;
 import picocli.CommandLine.Command;
@@ -54,13 +55,16 @@ final class KernelCommand implements Callable<Integer> {
   static int serve(String connectionFile, Streams streams) throws InterruptedException {
     Path file = Paths.of(connectionFile);
     ConnectionInfo connection = ConnectionFile.read(file);
+    Map<String, String> premises = PremiseFile.ofEnvironment();
     Locale.setDefault(Locale.ROOT);
     Consumer<String> log = line -> streams.err().println("pinchoff: " + Printable.line(line));
     try (KernelServer server =
         new KernelServer(
             connection,
             Limits.standard(),
-            () -> JShellEvaluator.create(EvaluatorOptions.standard().withLog(log)),
+            () ->
+                JShellEvaluator.create(
+                    EvaluatorOptions.standard().withLog(log).withPremises(premises)),
             log)) {
       String parent = System.getenv("JPY_PARENT_PID");
       if (parent != null) {

@@ -58,13 +58,14 @@ public final class Pinchoff implements Callable<Integer> {
   @Override
   public Integer call() {
     throw new CommandLine.ParameterException(
-        spec.commandLine(), "a command is missing: expected run, register or kernel");
+        spec.commandLine(), "a command is missing: expected run, review, register or kernel");
   }
 
   private static CommandLine commands(Streams streams) {
     CommandLine commands =
         new CommandLine(new Pinchoff())
             .addSubcommand(new RunCommand(streams))
+            .addSubcommand(new ReviewCommand(streams))
             .addSubcommand(new RegisterCommand(streams))
             .addSubcommand(new KernelCommand(streams));
     return commands

@@ -6,11 +6,15 @@ import java.nio.file.Path;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import java.util.TreeSet;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.ArgGroup;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import pinchoff.kernel.client.KernelGoneException;
@@ -19,10 +23,8 @@ import pinchoff.kernel.limits.Limits;
 import pinchoff.kernel.notebook.Notebook;
 import pinchoff.kernel.notebook.NotebookFile;
 import pinchoff.kernel.run.CellRun;
-import pinchoff.kernel.run.KernelLauncher;
 import pinchoff.kernel.run.NotebookRun;
 import pinchoff.kernel.run.NotebookRunner;
-import pinchoff.kernel.run.ProcessKernel;
 import pinchoff.kernel.run.RunOptions;
 
 /** Runs notebooks and writes them with their outputs. */
@@ -41,13 +43,12 @@ import pinchoff.kernel.run.RunOptions;
       "A notebook is a program that runs with your rights."
     })
 final class RunCommand implements Callable<Integer> {
-  private static final Duration START_LIMIT = Duration.ofSeconds(60);
-
   private final Streams streams;
-  private final KernelLauncher launcher;
 
   @Parameters(paramLabel = "NOTEBOOK", arity = "1..*", description = "Notebook files to run.")
   private List<String> notebooks = new ArrayList<>();
+
+  @Mixin private PremiseOptions premises = new PremiseOptions();
 
   @ArgGroup private Destination destination = new Destination();
 
@@ -78,12 +79,7 @@ final class RunCommand implements Callable<Integer> {
   }
 
   RunCommand(Streams streams) {
-    this(streams, folder -> ProcessKernel.start(KernelJava.command(), folder, START_LIMIT));
-  }
-
-  RunCommand(Streams streams, KernelLauncher launcher) {
     this.streams = streams;
-    this.launcher = launcher;
   }
 
   @Override
@@ -92,10 +88,11 @@ final class RunCommand implements Callable<Integer> {
       throw new UsageException(
           "--output names one file, but there are " + notebooks.size() + " notebooks to run");
     }
-    NotebookRunner runner = new NotebookRunner(launcher, options());
+    Map<String, String> given = premises.all();
+    NotebookRunner runner = new NotebookRunner(new KernelStarter(given), options());
     int worst = ExitCode.FINE;
     for (String notebook : notebooks) {
-      worst = Math.max(worst, runOne(notebook, runner));
+      worst = Math.max(worst, runOne(notebook, runner, given.keySet()));
     }
     return worst;
   }
@@ -113,9 +110,10 @@ final class RunCommand implements Callable<Integer> {
   }
 
   /** A notebook that cannot be read does not keep the others from running. */
-  private int runOne(String argument, NotebookRunner runner) throws InterruptedException {
+  private int runOne(String argument, NotebookRunner runner, Set<String> given)
+      throws InterruptedException {
     try {
-      return run(Paths.of(argument), runner);
+      return run(Paths.of(argument), runner, given);
     } catch (KernelGoneException | KernelTimeoutException e) {
       streams
           .err()
@@ -130,7 +128,8 @@ final class RunCommand implements Callable<Integer> {
     }
   }
 
-  private int run(Path file, NotebookRunner runner) throws IOException, InterruptedException {
+  private int run(Path file, NotebookRunner runner, Set<String> given)
+      throws IOException, InterruptedException {
     Notebook notebook = NotebookFile.read(file, Limits.standard());
     NotebookRunner.requireJava(notebook, file.toString());
     Path target = target(file);
@@ -144,7 +143,15 @@ final class RunCommand implements Callable<Integer> {
     }
     NotebookFile.write(target, run.notebook());
     report(file, run, target);
-    return run.ok() ? ExitCode.FINE : ExitCode.FINDING;
+    Set<String> unread = new TreeSet<>(given);
+    unread.removeAll(run.premisesRead());
+    unread.forEach(
+        name ->
+            streams
+                .err()
+                .println(
+                    Printable.line(file + ": premise " + name + " was set, but no cell reads it")));
+    return run.ok() && unread.isEmpty() ? ExitCode.FINE : ExitCode.FINDING;
   }
 
   private Path target(Path file) {

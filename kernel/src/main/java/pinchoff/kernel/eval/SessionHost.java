@@ -2,8 +2,10 @@ package pinchoff.kernel.eval;
 
 import java.util.Collections;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.function.Function;
 import java.util.regex.Pattern;
 import pinchoff.display.Host;
@@ -15,6 +17,7 @@ final class SessionHost implements Host {
 
   private final SessionVariables variables;
   private final Map<String, String> premises;
+  private final Set<String> premisesRead = Collections.synchronizedSet(new LinkedHashSet<>());
   private final Function<String, Optional<MimeBundle>> help;
   private final Map<String, String> technologies =
       Collections.synchronizedMap(new LinkedHashMap<>());
@@ -53,7 +56,15 @@ final class SessionHost implements Host {
 
   @Override
   public Optional<String> premise(String name) {
+    premisesRead.add(name);
     return Optional.ofNullable(premises.get(name));
+  }
+
+  @Override
+  public String premisesRead() {
+    synchronized (premisesRead) {
+      return String.join(" ", premisesRead);
+    }
   }
 
   @Override

@@ -1,6 +1,7 @@
 package pinchoff.kernel.run;
 
 import java.util.List;
+import java.util.Set;
 import pinchoff.kernel.notebook.Notebook;
 
 /**
@@ -8,12 +9,14 @@ import pinchoff.kernel.notebook.Notebook;
  *
  * @param notebook the notebook with the outputs of this run
  * @param cells how each code cell ended, in order
+ * @param premisesRead the premises that cells have asked for
  */
-public record NotebookRun(Notebook notebook, List<CellRun> cells) {
+public record NotebookRun(Notebook notebook, List<CellRun> cells, Set<String> premisesRead) {
 
-  /** Copies the list. */
+  /** Copies the collections. */
   public NotebookRun {
     cells = List.copyOf(cells);
+    premisesRead = Set.copyOf(premisesRead);
   }
 
   /** The cells that failed, ran out of time or lost their kernel. */

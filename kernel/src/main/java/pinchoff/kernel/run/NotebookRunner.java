@@ -7,11 +7,16 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
+import pinchoff.kernel.client.CellReply;
+import pinchoff.kernel.client.KernelGoneException;
+import pinchoff.kernel.client.OutputListener;
 import pinchoff.kernel.notebook.CodeCell;
 import pinchoff.kernel.notebook.Notebook;
 import pinchoff.kernel.notebook.NotebookCell;
 import pinchoff.kernel.notebook.NotebookException;
 import pinchoff.kernel.notebook.OutputRecorder;
+import pinchoff.kernel.protocol.ExecuteRequest;
 
 /** Runs notebooks, each in a fresh kernel. */
 public final class NotebookRunner {
@@ -67,12 +72,31 @@ public final class NotebookRunner {
       Map<String, Object> language = kernel.info(INFO_LIMIT).languageInfo();
       OutputRecorder recorder = new OutputRecorder();
       List<CellRun> runs = runCells(notebook, new CellRunner(kernel, options, recorder), listener);
+      Set<String> premises =
+          runs.stream().anyMatch(r -> r.ending() == CellRun.Ending.KERNEL_GONE)
+              ? Set.of()
+              : premisesRead(kernel);
       return new NotebookRun(
           notebook
               .withCells(withOutputs(notebook, runs, recorder))
               .withMetadata("kernelspec", kernelspec(notebook))
               .withMetadata("language_info", language),
-          runs);
+          runs,
+          premises);
+    }
+  }
+
+  /** Asks the kernel at the end of a run, without leaving a trace in the notebook. */
+  private static Set<String> premisesRead(RunKernel kernel) throws InterruptedException {
+    Map<String, Object> expressions =
+        Map.of("premises", "pinchoff.display.Host.current().premisesRead()");
+    try {
+      CellReply reply =
+          kernel.execute(
+              new ExecuteRequest("", true, false, expressions, false, false), OutputListener.NONE);
+      return PremiseReport.of(reply.userExpressions().get("premises"));
+    } catch (KernelGoneException gone) {
+      return Set.of();
     }
   }
 

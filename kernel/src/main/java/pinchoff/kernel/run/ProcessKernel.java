@@ -27,12 +27,14 @@ public final class ProcessKernel implements RunKernel {
    *
    * @param command program and arguments, see {@link KernelProcess#start}
    * @param folder where it runs
+   * @param environment variables added to those of this process
    * @param limit how long it may take to answer
    * @throws IOException if it cannot be started
    */
-  public static ProcessKernel start(List<String> command, Path folder, Duration limit)
+  public static ProcessKernel start(
+      List<String> command, Path folder, Map<String, String> environment, Duration limit)
       throws IOException, InterruptedException {
-    return new ProcessKernel(KernelProcess.start(command, folder, Map.of(), limit));
+    return new ProcessKernel(KernelProcess.start(command, folder, environment, limit));
   }
 
   @Override

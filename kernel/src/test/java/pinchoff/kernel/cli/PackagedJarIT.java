@@ -15,7 +15,11 @@ import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
 import java.util.concurrent.TimeUnit;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -27,10 +31,14 @@ import pinchoff.kernel.client.KernelProcess;
 import pinchoff.kernel.client.OutputListener;
 import pinchoff.kernel.limits.Limits;
 import pinchoff.kernel.notebook.CodeCell;
+import pinchoff.kernel.notebook.Notebook;
 import pinchoff.kernel.notebook.NotebookFile;
 import pinchoff.kernel.notebook.Output;
 import pinchoff.kernel.protocol.ExecuteRequest;
 import pinchoff.kernel.protocol.ExecuteResult;
+import pinchoff.kernel.review.Review;
+import pinchoff.kernel.run.CellRun;
+import pinchoff.kernel.run.NotebookRun;
 
 /** The packaged program as its users start it. */
 class PackagedJarIT {
@@ -148,6 +156,67 @@ class PackagedJarIT {
   }
 
   @Test
+  void premisesAreSetFromOutside() throws Exception {
+    notebook("premises.ipynb", "var V_DD = premise(\"V_DD\", V(1.8));\nV_DD.value()");
+    Ended usual = pinchoff("run", "--print", "premises.ipynb");
+    assertTrue(usual.out().contains("1.8 V"), usual::out);
+    Ended set = pinchoff("run", "--print", "--premise", "V_DD=1.62 V", "premises.ipynb");
+    assertEquals(0, set.code(), set::err);
+    assertTrue(set.out().contains("1.62 V"), set::out);
+    Files.writeString(folder.resolve("low.premises"), "# a low supply\nV_DD = 1.5V\n");
+    Ended file = pinchoff("run", "--print", "--premises", "low.premises", "premises.ipynb");
+    assertTrue(file.out().contains("1.5 V"), file::out);
+    Ended unread = pinchoff("run", "--premise", "V_SS=0 V", "premises.ipynb");
+    assertEquals(1, unread.code());
+    assertTrue(unread.err().contains("premise V_SS was set, but no cell reads it"), unread::err);
+    Ended wrong = pinchoff("run", "--premise", "V_DD=20 uA", "premises.ipynb");
+    assertEquals(1, wrong.code());
+    assertTrue(wrong.err().contains("20 µA is a current (A): expected a voltage"), wrong::err);
+  }
+
+  /** Every number of the first notebook and of its technology file, changed in turn, is found. */
+  @Test
+  void aReviewFindsWhateverWasChanged() throws Exception {
+    assertEquals(0, pinchoff("run", "first-bias.ipynb").code());
+    Ended honest = pinchoff("review", "first-bias.out.ipynb");
+    assertEquals(0, honest.code(), honest::out);
+    assertTrue(honest.out().contains("reproduced; 52 of 52 stored values compared"), honest::out);
+    Notebook rerun = NotebookFile.read(folder.resolve("first-bias.out.ipynb"), Limits.standard());
+    List<CellRun> cells = new ArrayList<>();
+    for (CodeCell cell : cells("first-bias.out.ipynb")) {
+      cells.add(
+          new CellRun(1, cell.id(), CellRun.Ending.DONE, cell.executionCount(), Optional.empty()));
+    }
+    NotebookRun run = new NotebookRun(rerun, cells, Set.of());
+    assertTrue(Review.of(rerun, run).ok());
+    String stored = Files.readString(folder.resolve("first-bias.out.ipynb"));
+    Matcher value =
+        Pattern.compile("\"unit\": \"[^\"]*\",\\s+\"value\": (-?[0-9.eE-]+)").matcher(stored);
+    int changed = 0;
+    while (value.find()) {
+      double old = Double.parseDouble(value.group(1));
+      String forged =
+          stored.substring(0, value.start(1))
+              + (old == 0 ? 1e-6 : old * 1.001)
+              + stored.substring(value.end(1));
+      byte[] bytes = forged.getBytes(StandardCharsets.UTF_8);
+      Review review = Review.of(NotebookFile.parse(bytes, "forged", Limits.standard()), run);
+      assertFalse(review.ok(), () -> "not found: " + value.group());
+      changed++;
+    }
+    assertTrue(changed >= 40, "only " + changed + " values were changed");
+    Path tech = folder.resolve("larch180.tech.json");
+    String text = Files.readString(tech);
+    Files.writeString(tech, text.replace("\"0.45 V\"", "\"0.46 V\""));
+    Ended moved = pinchoff("review", "first-bias.out.ipynb");
+    assertEquals(1, moved.code());
+    assertTrue(
+        moved.out().lines().findFirst().orElse("").contains("technology changed"), moved::out);
+    assertTrue(moved.out().contains("moved: I_D was"), moved::out);
+    assertEquals(1, pinchoff("review", "first-bias.ipynb").code(), "nothing is stored");
+  }
+
+  @Test
   void aKernelThatDiesIsNamedAndThePartIsSaved() throws Exception {
     notebook(
         "dies.ipynb",
@@ -163,7 +232,7 @@ class PackagedJarIT {
   @Test
   void aCellThatTakesTooLongIsStopped() throws Exception {
     notebook("slow.ipynb", "var kept = 1;", "while (true) { }", "kept");
-    Ended ended = pinchoff("run", "--cell-limit", "1", "--past-errors", "slow.ipynb");
+    Ended ended = pinchoff("run", "--cell-limit", "6", "--past-errors", "slow.ipynb");
     assertEquals(1, ended.code(), ended::err);
     assertTrue(cells("slow.out.ipynb").get(2).outputs().toString().contains("1"));
   }
@@ -186,6 +255,8 @@ class PackagedJarIT {
             "--output",
             "no/x.ipynb",
             "first-bias.ipynb"),
+        refusal(
+            "bad premise", "expected NAME=VALUE", "run", "--premise", "V_DD", "first-bias.ipynb"),
         refusal("bad limit", "--cell-limit", "run", "--cell-limit", "-1", "first-bias.ipynb"),
         refusal("missing connection file", "there is no such file", "kernel", "nothing.json"),
         refusal("broken connection file", "broken.ipynb", "kernel", "broken.ipynb"),

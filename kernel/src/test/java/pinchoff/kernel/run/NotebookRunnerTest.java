@@ -42,6 +42,14 @@ class NotebookRunnerTest {
     @Override
     public CellReply execute(ExecuteRequest request, OutputListener listener)
         throws InterruptedException {
+      if (request.silent()) {
+        return new CellReply(
+            CellReply.Status.OK,
+            Optional.of(count),
+            Optional.empty(),
+            Map.of("premises", Map.of("status", "ok", "data", Map.of("text/plain", "V_DD I_REF"))),
+            List.of());
+      }
       ran.add(request.code());
       listener.started(++count);
       switch (request.code()) {
@@ -120,6 +128,7 @@ class NotebookRunnerTest {
                 + code("two"));
     assertEquals(List.of("one", "two"), kernel.ran);
     assertTrue(run.ok() && run.reachedEnd() && kernel.closed);
+    assertEquals(java.util.Set.of("V_DD", "I_REF"), run.premisesRead());
     assertEquals("cell [2]", run.cells().get(1).label());
   }
 
