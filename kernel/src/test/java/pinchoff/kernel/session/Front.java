@@ -50,6 +50,11 @@ public abstract class Front implements AutoCloseable {
     }
   }
 
+  /** Makes this front end's messages. */
+  public MessageFactory messages() {
+    return messages;
+  }
+
   /** Sends a message. */
   public abstract void send(Channel channel, Message message);
 
