@@ -161,6 +161,20 @@ public record Transistor(
     return TransferCurve.of(this, drain.value());
   }
 
+  /** The plane of V_DS and V_GS with the regions; V_SD and V_SG for a p device. */
+  public RegionMap regionMap() {
+    return RegionMap.of(this);
+  }
+
+  /**
+   * g_m/I_D against the inversion coefficient, with both asymptotes.
+   *
+   * @throws DeviceException if no slope factor is known
+   */
+  public EfficiencyCurve efficiencyCurve() {
+    return new EfficiencyCurve(this, List.of());
+  }
+
   @Override
   public String toString() {
     return "%s, W/L = %s%s/%s"

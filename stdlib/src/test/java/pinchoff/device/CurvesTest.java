@@ -108,4 +108,44 @@ class CurvesTest {
     assertTrue(bundle.data().containsKey(MimeBundle.PNG), () -> bundle.data().keySet().toString());
     assertTrue(bundle.plainText().contains("edge of saturation"), bundle::plainText);
   }
+
+  @Test
+  void theRegionMapHasTheBoundaryAtTheOverdrive() {
+    Chart chart = n.regionMap().mark(n.at(vgs(V(0.8)), vds(V(1)))).chart();
+    Points boundary = only(chart, Locus.class).points();
+    for (int i = 0; i < boundary.size(); i++) {
+      double expected = Math.min(1.98, Math.max(0, boundary.y(i) - 0.45));
+      assertEquals(expected, boundary.x(i), 1e-12);
+    }
+    String text = chart.description();
+    for (String part : new String[] {"cutoff", "triode", "saturation", "350 mV of margin"}) {
+      assertTrue(text.contains(part), text);
+    }
+  }
+
+  /** Weak-inversion limit 1/(n U_T) and IC = 10: Enz, Krummenacher and Vittoz (1995). */
+  @Test
+  void efficiencyFollowsTheInterpolation() {
+    Transistor t =
+        Device.of(
+                Devices.plain(Polarity.N, 0.45, 3e-4)
+                    .slopeFactor(
+                        pinchoff.quantity.Quantity.ofSi(1.3, pinchoff.quantity.Dimension.NONE))
+                    .build())
+            .sized(um(1), um(1));
+    Points curve = only(t.efficiencyCurve().chart(), Line.class).points();
+    double limit = 1 / (1.3 * 0.0258519997864);
+    assertEquals(limit, curve.y(0), 0.02 * limit);
+    for (int i = 0; i < curve.size(); i++) {
+      if (Math.abs(curve.x(i) - 10) < 1e-9) {
+        Close.assertRelative(9.01111932896, curve.y(i), 1e-6, "IC = 10");
+      }
+    }
+    assertThrows(
+        DeviceException.class,
+        () ->
+            Device.of(Devices.plain(Polarity.N, 0.45, 3e-4).build())
+                .sized(um(1), um(1))
+                .efficiencyCurve());
+  }
 }

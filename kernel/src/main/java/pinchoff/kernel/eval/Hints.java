@@ -65,7 +65,9 @@ final class Hints {
       case "class" -> Optional.of("if " + name + " is a type of a library, import it first");
       case "variable" ->
           Optional.of(
-              "is it declared in a cell that has run? A text needs quotes: \"" + name + "\"");
+              name.matches("\\p{Lu}\\w*\\p{Ll}\\w*")
+                  ? "if " + name + " is a type of a library, import it first"
+                  : "is it declared in a cell that has run? A text needs quotes: \"" + name + "\"");
       default -> Optional.empty();
     };
   }
