@@ -3,6 +3,7 @@ package pinchoff.kernel.review;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -46,7 +47,23 @@ record StoredValue(Map<String, Object> fields) {
 
   /** Limits and tolerance as they stand: these belong to what is promised. */
   String promise() {
-    return "limits " + fields.get("limits") + ", tolerance " + fields.get("tolerance");
+    return "limits "
+        + sorted(fields.get("limits"))
+        + ", tolerance "
+        + sorted(fields.get("tolerance"));
+  }
+
+  /** Numbers by name, whatever order and form a file has them in. */
+  private static Map<String, String> sorted(@Nullable Object tree) {
+    Map<String, String> sorted = new TreeMap<>();
+    if (tree instanceof Map<?, ?> map) {
+      map.forEach(
+          (key, value) ->
+              sorted.put(
+                  String.valueOf(key),
+                  number(value).map(String::valueOf).orElse(String.valueOf(value))));
+    }
+    return sorted;
   }
 
   Optional<String> relation() {

@@ -111,6 +111,7 @@ class ReviewTest {
         "\"value\": 50000|\"value\": 50400",
         "\"value\": 2.5e-5|\"value\": 2.50000000001e-5",
         "\"unit\": \"kohm\"|\"unit\": \"ohm\"",
+        "{\"min\": 1.8e-5, \"max\": 2.2e-5}|{\"max\": 0.000022, \"min\": 0.000018}",
         "\"words\": \"holds\"|\"words\": \"is fine\"",
       })
   void whatIsWithinToleranceOrOnlyLooksDifferentIsNot(String from, String to) {
