@@ -66,7 +66,13 @@ public final class KernelClient implements AutoCloseable {
    */
   public KernelInfoReply kernelInfo(Duration limit) throws InterruptedException {
     long deadline = System.nanoTime() + limit.toNanos();
-    Content reply = request(Channel.SHELL, new KernelInfoRequest(), limit);
+    Message message = messages.request(new KernelInfoRequest());
+    Content reply;
+    try (Exchange exchange = open(message)) {
+      sockets.send(Channel.SHELL, message);
+      // Not its idle status: that may be broadcast before this client's subscription is known.
+      reply = exchange.awaitReply(limit);
+    }
     long rest = Math.max(0, deadline - System.nanoTime());
     if (!broadcastsArrive.await(rest, TimeUnit.NANOSECONDS)) {
       throw new KernelTimeoutException("no broadcast of the kernel came within " + limit);
